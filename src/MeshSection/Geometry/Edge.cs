@@ -1,0 +1,56 @@
+namespace MeshSection.Geometry;
+
+/// <summary>
+/// One smooth piece of a boundary, run through from <see cref="Start"/> to <see cref="End"/>. The two end points are
+/// stored as given, never recomputed, so that neighbouring edges meet in the same bits.
+/// </summary>
+/// <param name="Start">Where the edge begins.</param>
+/// <param name="End">Where the edge ends.</param>
+public abstract record Edge(Point Start, Point End)
+{
+    /// <summary>Length along the edge, never negative.</summary>
+    public abstract double Length { get; }
+
+    /// <summary>The smallest box that holds the edge.</summary>
+    public abstract Box Bounds { get; }
+
+    /// <summary>Greatest distance of the edge from its chord; 0 for a straight edge.</summary>
+    public abstract double Sag { get; }
+
+    /// <summary>The vector from start to end.</summary>
+    public Point Chord => End - Start;
+
+    /// <summary>The point at a fraction of the edge's length.</summary>
+    /// <param name="t">0 at the start (exactly <see cref="Start"/>), 1 at the end (exactly <see cref="End"/>).</param>
+    public abstract Point PointAt(double t);
+
+    /// <summary>The unit vector along the edge, in its running direction.</summary>
+    /// <param name="t">Fraction of the edge's length, 0 to 1.</param>
+    public abstract Point TangentAt(double t);
+
+    /// <summary>The same curve run through the other way.</summary>
+    public abstract Edge Reversed();
+
+    /// <summary>The piece between two fractions of the edge's length.</summary>
+    /// <param name="from">Where the piece begins, 0 to 1.</param>
+    /// <param name="to">Where the piece ends, greater than <paramref name="from"/>.</param>
+    public abstract Edge Part(double from, double to);
+
+    /// <summary>The edge moved, turned, mirrored or scaled.</summary>
+    /// <param name="placement">The similarity to apply to every point.</param>
+    public abstract Edge Placed(Placement placement);
+
+    /// <summary>
+    /// The fractions of the edge's length at which it runs at right angles to a direction, in rising order, ends
+    /// excluded: where the distance along that direction may be extreme.
+    /// </summary>
+    /// <param name="direction">A vector that is not zero.</param>
+    public abstract IReadOnlyList<double> Turnings(Point direction);
+
+    /// <summary>
+    /// The fractions of the edge's length at which it crosses the line n·p = c, in rising order, ends excluded.
+    /// </summary>
+    /// <param name="normal">n, a unit vector.</param>
+    /// <param name="offset">c, the line's distance from the origin along n.</param>
+    public abstract IReadOnlyList<double> Crossings(Point normal, double offset);
+}

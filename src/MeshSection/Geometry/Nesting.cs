@@ -62,7 +62,7 @@ internal static class Nesting
             area += 0.5 * (edge.Start - anchor).Cross(edge.End - anchor);
             if (edge is ArcEdge arc)
             {
-                area += Cap.Area(arc);
+                area += Cap.Of(arc).Area;
             }
         }
 

@@ -9,6 +9,9 @@ public enum OutlineFault
     /// <summary>A coordinate is NaN or infinite, or a bulge is zero or not finite.</summary>
     NotFinite,
 
+    /// <summary>An edge begins and ends in the same point.</summary>
+    NoLength,
+
     /// <summary>A boundary encloses no area.</summary>
     NoArea,
 

@@ -41,12 +41,12 @@ public sealed record ArcEdge(Point Start, Point End, double Bulge) : Edge(Start,
         get
         {
             var box = Box.Of(Start, End);
-            foreach (var t in Turnings(new Point(1, 0)))
+            foreach (var t in Turnings(Point.AlongX))
             {
                 box = box.With(PointAt(t));
             }
 
-            foreach (var t in Turnings(new Point(0, 1)))
+            foreach (var t in Turnings(Point.AlongY))
             {
                 box = box.With(PointAt(t));
             }
@@ -96,6 +96,14 @@ public sealed record ArcEdge(Point Start, Point End, double Bulge) : Edge(Start,
     /// <inheritdoc/>
     public override Edge Part(double from, double to) =>
         new ArcEdge(PointAt(from), PointAt(to), Math.Tan(0.25 * (to - from) * Sweep));
+
+    /// <inheritdoc/>
+    public override double Steps(double maxSag, double maxTurn)
+    {
+        // A piece of sweep θ has the sag r (1 - cos θ/2) = 2 r sin² θ/4.
+        var bySag = 4 * Math.Asin(Math.Min(1, Math.Sqrt(0.5 * maxSag / Radius)));
+        return Math.Ceiling(Math.Abs(Sweep) / Math.Min(maxTurn, bySag) * (1 - 1e-12));
+    }
 
     /// <inheritdoc/>
     public override Edge Placed(Placement placement) =>

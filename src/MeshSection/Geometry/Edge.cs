@@ -36,6 +36,11 @@ public abstract record Edge(Point Start, Point End)
     /// <param name="to">Where the piece ends, greater than <paramref name="from"/>.</param>
     public abstract Edge Part(double from, double to);
 
+    /// <summary>Into how many pieces of equal length the edge must be cut so that chords follow it closely enough.</summary>
+    /// <param name="maxSag">Greatest distance allowed between a chord and its piece, positive.</param>
+    /// <param name="maxTurn">Greatest turn of the tangent allowed over a piece, radians, positive.</param>
+    public abstract double Steps(double maxSag, double maxTurn);
+
     /// <summary>The edge moved, turned, mirrored or scaled.</summary>
     /// <param name="placement">The similarity to apply to every point.</param>
     public abstract Edge Placed(Placement placement);

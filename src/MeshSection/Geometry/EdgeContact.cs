@@ -12,6 +12,7 @@ internal readonly record struct Contact(Point Point, bool Crosses);
 /// </summary>
 internal static class EdgeContact
 {
+    /// <summary>The first place found where the edges cross or come nearer than the tolerance, or null.</summary>
     public static Contact? Find(Edge a, Edge b, double tolerance)
     {
         var (sagA, sagB) = (a.Sag, b.Sag);
@@ -64,7 +65,8 @@ internal static class EdgeContact
     private static bool Opposite(double from, double to, double tolerance) =>
         (from > tolerance && to < -tolerance) || (from < -tolerance && to > tolerance);
 
-    private static double ChordDistance(Point a, Point b, Point c, Point d)
+    /// <summary>The shortest distance between the straight pieces ab and cd; 0 if they cross.</summary>
+    public static double ChordDistance(Point a, Point b, Point c, Point d)
     {
         var (ab, cd) = (b - a, d - c);
         if (ab.Cross(c - a) > 0 != ab.Cross(d - a) > 0 && cd.Cross(a - c) > 0 != cd.Cross(b - c) > 0)

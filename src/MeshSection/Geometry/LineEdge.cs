@@ -27,6 +27,9 @@ public sealed record LineEdge(Point Start, Point End) : Edge(Start, End)
     public override Edge Part(double from, double to) => new LineEdge(PointAt(from), PointAt(to));
 
     /// <inheritdoc/>
+    public override double Steps(double maxSag, double maxTurn) => 1;
+
+    /// <inheritdoc/>
     public override Edge Placed(Placement placement) => new LineEdge(placement.Apply(Start), placement.Apply(End));
 
     /// <inheritdoc/>

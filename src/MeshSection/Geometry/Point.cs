@@ -8,6 +8,12 @@ public readonly record struct Point(double X, double Y)
     /// <summary>The origin.</summary>
     public static Point Origin => default;
 
+    /// <summary>The unit vector along x.</summary>
+    public static Point AlongX => new(1, 0);
+
+    /// <summary>The unit vector along y.</summary>
+    public static Point AlongY => new(0, 1);
+
     /// <summary>Distance from the origin; the length of the vector.</summary>
     public double Length => double.Hypot(X, Y);
 

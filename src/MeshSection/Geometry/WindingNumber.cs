@@ -3,8 +3,6 @@ namespace MeshSection.Geometry;
 /// <summary>How many times a loop runs counter-clockwise around a point.</summary>
 internal static class WindingNumber
 {
-    private static readonly Point Up = new(0, 1);
-
     /// <summary>The winding number of a loop about a point that does not lie on it.</summary>
     public static int Of(Boundary loop, Point p)
     {
@@ -20,7 +18,7 @@ internal static class WindingNumber
 
             var from = 0.0;
             var start = edge.Start;
-            foreach (var to in edge.Turnings(Up).Append(1))
+            foreach (var to in edge.Turnings(Point.AlongY).Append(1))
             {
                 var end = edge.PointAt(to);
                 if (start.Y <= p.Y != end.Y <= p.Y && IsRightOf(edge, from, to, start, end, p))
@@ -43,7 +41,7 @@ internal static class WindingNumber
             return start.Y <= p.Y ? side > 0 : side < 0;
         }
 
-        foreach (var t in edge.Crossings(Up, p.Y))
+        foreach (var t in edge.Crossings(Point.AlongY, p.Y))
         {
             if (t > from && t < to)
             {

@@ -1,0 +1,116 @@
+using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Units;
+using MeshSection.Geometry;
+
+namespace MeshSection.Dxf.Curves;
+
+/// <summary>
+/// Axes near the drawing's entities, in mm. The origin is a multiple of a power of two, chosen from the extents alone,
+/// so that subtracting it is exact: a drawing and its copy moved by such multiples have the same local geometry in
+/// every bit, wherever they lie.
+/// </summary>
+/// <param name="Origin">The local origin in the drawing's axes and unit.</param>
+/// <param name="Extents">What the entities span, in the drawing's axes and unit.</param>
+/// <param name="Scale">Millimetres per unit of the drawing.</param>
+internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
+{
+    // The origin lies within this part of the extents' diagonal from their centre.
+    private const double Coarseness = 1.0 / 64;
+
+    // Beyond these, squares of lengths leave the range of double precision.
+    private const double Least = 1e-100;
+    private const double Greatest = 1e100;
+
+    /// <summary>The diagonal of the extents, mm.</summary>
+    public double Diagonal => Scale * Extents.Diagonal;
+
+    /// <summary>The spacing of the numbers by which the drawing states its farthest coordinate.</summary>
+    public double Spacing => SpacingAt(Farthest(Extents));
+
+    public static LocalFrame Of(List<Entity> entities, LengthUnit unit)
+    {
+        var anchor = Anchor(entities);
+        var box = BoundsFrom(anchor, entities);
+        if (box == Box.Empty)
+        {
+            throw OutlineFaults.AllWithoutLength(entities[0]);
+        }
+
+        var size = box.Diagonal * unit.Millimetres;
+        var extents = new Box(box.MinX + anchor.X, box.MinY + anchor.Y, box.MaxX + anchor.X, box.MaxY + anchor.Y);
+        if (!(size is > Least and < Greatest && Farthest(extents) * unit.Millimetres < Greatest))
+        {
+            throw OutlineFaults.ExtentsUnusable(extents, unit);
+        }
+
+        var step = Math.Max(Math.ScaleB(1, Math.ILogB(box.Diagonal * Coarseness)), SpacingAt(Farthest(extents)));
+        var origin = new Point(Rounded(anchor.X, box.Centre.X, step), Rounded(anchor.Y, box.Centre.Y, step));
+        return new LocalFrame(origin, extents, unit.Millimetres);
+    }
+
+    /// <summary>A point of the drawing in local axes, mm.</summary>
+    public Point ToLocal(Point p) => Scale * (p - Origin) + Point.Origin; // + 0 turns -0 into 0
+
+    /// <summary>A local point in the drawing's axes and unit.</summary>
+    public Point ToDrawing(Point p) => Origin + p / Scale;
+
+    private static double Farthest(Box box) => Math.Max(
+        Math.Max(Math.Abs(box.MinX), Math.Abs(box.MaxX)), Math.Max(Math.Abs(box.MinY), Math.Abs(box.MaxY)));
+
+    private static double SpacingAt(double coordinate) => Math.BitIncrement(coordinate) - coordinate;
+
+    /// <summary>anchor + offset, rounded to a multiple of the step without first losing digits of the offset.</summary>
+    private static double Rounded(double anchor, double offset, double step)
+    {
+        var whole = Math.Floor(anchor / step) * step;
+        return whole + Math.Round((anchor - whole + offset) / step) * step;
+    }
+
+    /// <summary>The least coordinates that the entities state.</summary>
+    private static Point Anchor(List<Entity> entities)
+    {
+        var box = Box.Empty;
+        foreach (var entity in entities)
+        {
+            switch (entity)
+            {
+                case LineEntity line:
+                    box = box.With(line.Start).With(line.End);
+                    break;
+                case ArcEntity arc:
+                    box = box.With(arc.Centre);
+                    break;
+                case CircleEntity circle:
+                    box = box.With(circle.Centre);
+                    break;
+                case PolylineEntity polyline:
+                    foreach (var vertex in polyline.Vertices)
+                    {
+                        box = box.With(vertex.Point);
+                    }
+
+                    break;
+            }
+        }
+
+        return new Point(box.MinX, box.MinY);
+    }
+
+    private static Box BoundsFrom(Point anchor, List<Entity> entities)
+    {
+        var frame = new LocalFrame(anchor, default, 1);
+        var box = Box.Empty;
+        var edges = new List<Edge>();
+        foreach (var entity in entities)
+        {
+            edges.Clear();
+            EntityEdges.Append(entity, frame, edges);
+            foreach (var edge in edges)
+            {
+                box = box.With(edge.Bounds);
+            }
+        }
+
+        return box;
+    }
+}

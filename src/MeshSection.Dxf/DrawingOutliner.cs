@@ -1,0 +1,162 @@
+using System.Collections.Immutable;
+using MeshSection.Dxf.Curves;
+using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Loops;
+using MeshSection.Dxf.Selection;
+using MeshSection.Dxf.Units;
+using MeshSection.Geometry;
+
+namespace MeshSection.Dxf;
+
+/// <summary>Makes the outline of a drawing: chooses entities, turns them into edges, joins those into boundaries.</summary>
+public static class DrawingOutliner
+{
+    // Sections beyond these, in mm, are possible, but a wrong unit is likelier.
+    private const double VeryLarge = 100_000;
+    private const double VerySmall = 1;
+
+    // Coarser steps between neighbouring numbers, over the size of what is drawn, are worth a word.
+    private const double CoarseSpacing = 1e-10;
+
+    /// <summary>Makes the outline of a drawing. The order and direction in which it was drawn do not matter.</summary>
+    /// <param name="drawing">What was read.</param>
+    /// <param name="options">Unit, layers and joining.</param>
+    /// <returns>The outline in mm, the report, and the entity behind each edge.</returns>
+    /// <exception cref="DrawingException">No sound outline can be made; the message says why and what to do.</exception>
+    public static DrawingOutline Outline(Drawing drawing, OutlineOptions options)
+    {
+        ArgumentNullException.ThrowIfNull(drawing);
+        ArgumentNullException.ThrowIfNull(options);
+        var selection = EntitySelection.Of(drawing, options.Layers);
+        List<DrawingNote> notes = [.. drawing.Notes, .. selection.Notes];
+        CheckUsable(selection);
+        var unit = Unit(drawing, options, selection.Used, notes);
+        var frame = LocalFrame.Of(selection.Used, unit);
+        NoteSize(frame, notes);
+        NoteHeights(selection.Used, frame, notes);
+
+        var pieces = PieceList.Of(selection.Used, frame, notes);
+        if (pieces.Count == 0)
+        {
+            throw OutlineFaults.AllWithoutLength(selection.Used[0]);
+        }
+
+        var gap = JoinGap.Of(pieces, frame, options.Joining.MaxGap);
+        var loops = LoopFinder.Find(pieces, frame, gap, OutlineFaults.Unread(selection), notes, out var joins);
+        var outline = Sound(loops, frame);
+        var report = new DrawingReport
+        {
+            Release = drawing.Release,
+            Unit = unit,
+            IsUnitGiven = options.Unit is not null,
+            Extents = frame.Extents,
+            MaxGap = gap.Length / frame.Scale,
+            IsMaxGapGiven = gap.IsGiven,
+            Used = selection.UsedCounts,
+            LeftOut = selection.LeftOut,
+            Pieces = loops.Sum(l => l.Edges.Count),
+            Joins = joins,
+            Repairs = Sorted(notes.Where(n => n.IsRepair)),
+            Cautions = Sorted(notes.Where(n => !n.IsRepair)),
+        };
+        return new DrawingOutline(outline, report, Sources(outline, loops));
+    }
+
+    private static void CheckUsable(EntitySelection selection)
+    {
+        if (selection.Used.Count == 0)
+        {
+            throw OutlineFaults.NothingUsed(selection);
+        }
+
+        var tilted = selection.Used.FindAll(e => e is TiltedEntity);
+        if (tilted.Count > 0)
+        {
+            throw OutlineFaults.Tilted(tilted);
+        }
+    }
+
+    private static LengthUnit Unit(Drawing drawing, OutlineOptions options, List<Entity> used, List<DrawingNote> notes)
+    {
+        if (options.Unit is not { } given)
+        {
+            return drawing.Unit
+                ?? throw OutlineFaults.UnitUnknown(LocalFrame.Of(used, LengthUnit.Millimetre).Extents);
+        }
+
+        if (drawing.Unit is { } stated && stated != given)
+        {
+            notes.Add(DrawingNote.About(
+                NoteCode.UnitOverridden,
+                $"The drawing states its unit as {stated.Symbol}; it was read in {given.Symbol}, as asked for."));
+        }
+
+        return given;
+    }
+
+    private static void NoteSize(LocalFrame frame, List<DrawingNote> notes)
+    {
+        var size = Math.Max(frame.Extents.Width, frame.Extents.Height) * frame.Scale;
+        if (size > VeryLarge)
+        {
+            notes.Add(DrawingNote.About(
+                NoteCode.VeryLarge, $"What is drawn spans {Wording.Distance(size / 1000)} m: make sure that the unit is right."));
+        }
+        else if (size < VerySmall)
+        {
+            notes.Add(DrawingNote.About(
+                NoteCode.VerySmall, $"What is drawn spans only {Wording.Distance(size)} mm: make sure that the unit is right."));
+        }
+
+        if (frame.Spacing > CoarseSpacing * frame.Extents.Diagonal)
+        {
+            notes.Add(DrawingNote.About(
+                NoteCode.FewDigits,
+                $"So far from the drawing's origin, coordinates come in steps of {Wording.Distance(frame.Spacing)}: " +
+                "move the section to the origin to keep its shape exact."));
+        }
+    }
+
+    private static void NoteHeights(List<Entity> used, LocalFrame frame, List<DrawingNote> notes)
+    {
+        var lowest = used.MinBy(e => e.Height)!;
+        var highest = used.MaxBy(e => e.Height)!;
+        if (highest.Height - lowest.Height > 1e-6 * frame.Extents.Diagonal)
+        {
+            notes.Add(DrawingNote.About(
+                NoteCode.DifferentHeights,
+                $"Entities lie at heights from z = {Wording.Coordinate(lowest.Height)} ({lowest.Source.Name}) to z = " +
+                $"{Wording.Coordinate(highest.Height)} ({highest.Source.Name}); they were projected to the xy plane.",
+                lowest.Source,
+                highest.Source));
+        }
+    }
+
+    private static Outline Sound(List<Loop> loops, LocalFrame frame)
+    {
+        try
+        {
+            return Geometry.Outline.Create(loops.Select(l => Boundary.Create(l.Edges)), frame.Scale * frame.Origin);
+        }
+        catch (OutlineException unsound)
+        {
+            throw OutlineFaults.Unsound(unsound, loops, frame);
+        }
+    }
+
+    private static ImmutableArray<DrawingNote> Sorted(IEnumerable<DrawingNote> notes) => [.. notes.OrderBy(n => n.Code)];
+
+    /// <summary>The entity behind each edge; nesting may have turned a boundary round, its edges too.</summary>
+    private static ImmutableArray<ImmutableArray<EntitySource>> Sources(Outline outline, List<Loop> loops)
+    {
+        var sources = ImmutableArray.CreateBuilder<ImmutableArray<EntitySource>>(loops.Count);
+        for (var b = 0; b < loops.Count; b++)
+        {
+            var ofLoop = loops[b].Entities.Select(e => e.Source);
+            var isTurned = outline.Boundaries[b].Boundary.Edges[0] != loops[b].Edges[0];
+            sources.Add([.. isTurned ? ofLoop.Reverse() : ofLoop]);
+        }
+
+        return sources.MoveToImmutable();
+    }
+}

@@ -1,0 +1,173 @@
+using System.Collections.Immutable;
+using System.Globalization;
+using MeshSection.Dxf.Curves;
+using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Loops;
+using MeshSection.Dxf.Selection;
+using MeshSection.Dxf.Units;
+using MeshSection.Geometry;
+
+namespace MeshSection.Dxf;
+
+/// <summary>The errors of making an outline, each with its message.</summary>
+internal static class OutlineFaults
+{
+    public static DrawingException NoSuchLayer(string pattern, ImmutableArray<Layer> layers) => new(
+        DrawingFault.NoSuchLayer,
+        $"No layer matches '{pattern}'. The drawing has {string.Join(", ", layers.Take(20).Select(l => $"'{l.Name}'"))}" +
+        (layers.Length > 20 ? $" and {layers.Length - 20} more." : "."));
+
+    public static DrawingException NothingUsed(EntitySelection selection) => new(
+        DrawingFault.NoBoundary,
+        selection.LeftOut.IsEmpty
+            ? "The drawing has no entities. Make sure that the section is drawn in the model and was exported."
+            : "The drawing has nothing that an outline can be made of: no line, arc, circle or polyline is left. Left out: " +
+                string.Join("; ", selection.LeftOut.Take(8).Select(Described)) +
+                (selection.LeftOut.Length > 8 ? "; and more" : "") + "." + Unread(selection));
+
+    public static DrawingException AllWithoutLength(Entity first) => new(
+        DrawingFault.NoBoundary,
+        $"No entity has any length, from {first.Source} on. Draw the outline with lines, arcs, circles or polylines.")
+    { Places = [new EntityPlace(first.Source, null)] };
+
+    public static DrawingException Tilted(List<Entity> tilted) => new(
+        DrawingFault.TiltedEntity,
+        $"{Wording.Names(tilted.Select(t => t.Source))} {(tilted.Count == 1 ? "does" : "do")} not lie parallel to the " +
+        "drawing's xy plane, so that the true shape cannot be seen. Flatten the drawing, or leave them out with --layer.")
+    { Places = [.. tilted.Select(t => new EntityPlace(t.Source, null))] };
+
+    public static DrawingException UnitUnknown(Box extents) => new(
+        DrawingFault.UnitUnknown,
+        $"The drawing does not say its unit. What is drawn is {Size(extents, LengthUnit.Millimetre)} if it is in mm, " +
+        $"{Size(extents, LengthUnit.Metre)} if in m, {Size(extents, LengthUnit.Inch)} if in inches. " +
+        "Say which with --unit mm, --unit m or --unit in, or set $INSUNITS in the drawing.")
+    { Extents = extents };
+
+    public static DrawingException ExtentsUnusable(Box extents, LengthUnit unit) => new(
+        DrawingFault.ExtentsUnusable,
+        $"What is drawn spans {Wording.Distance(extents.Width)} by {Wording.Distance(extents.Height)} {unit.Symbol}, " +
+        "which is no cross-section. Correct or delete what lies so far away, or give another unit with --unit.")
+    { Extents = extents };
+
+    public static DrawingException ToleranceIsNoLength(double gap) => new(
+        DrawingFault.ToleranceUnusable,
+        $"The tolerance {gap.ToString(CultureInfo.InvariantCulture)} is no length. Give a number from 0 on, in the drawing's unit.");
+
+    public static DrawingException ToleranceTooLarge(double gap, double shortest, Piece piece, LocalFrame frame)
+    {
+        var at = frame.ToDrawing(piece.Edge.Start);
+        return new DrawingException(
+            DrawingFault.ToleranceUnusable,
+            $"The tolerance {Wording.Distance(gap)} is not below the shortest edge, {Wording.Distance(shortest)} long, of " +
+            $"{piece.Entity.Source} at {Wording.At(at)}: its own two ends would be joined. Give a smaller --tolerance.")
+        { Tolerance = gap, Distance = shortest, Places = [new EntityPlace(piece.Entity.Source, at)] };
+    }
+
+    public static DrawingException Branch(
+        List<Piece> met, Point place, bool isBridged, int branches, LocalFrame frame, JoinGap gap)
+    {
+        var at = frame.ToDrawing(place);
+        var places = met.Select(p => new EntityPlace(p.Entity.Source, at)).ToImmutableArray();
+        var names = Wording.Names(met.Select(p => p.Entity.Source));
+        var others = branches > 1 ? $" There are {branches} such points." : "";
+        if (met.TrueForAll(p => p.IsOfClosedEntity) && met.Select(p => p.Entity).Distinct().Count() > 1)
+        {
+            return new DrawingException(
+                DrawingFault.TouchingBoundaries,
+                $"Boundaries touch at {Wording.At(at)}: {names}.{others} Draw what is one piece as one boundary, or move them apart.")
+            { Places = places };
+        }
+
+        var gapHint = isBridged
+            ? $" Some of them lie up to {Wording.Distance(gap.Length / frame.Scale)} apart and were joined; a smaller --tolerance keeps them apart."
+            : "";
+        return new DrawingException(
+            DrawingFault.Branch,
+            $"{met.Count} ends meet at {Wording.At(at)}, where a boundary has two: {names}.{others}{gapHint} If one of them is " +
+            "no part of the outline (a centre line, say), delete it or leave out its layer with --layer.")
+        { Places = places };
+    }
+
+    public static DrawingException Open(List<(Piece Piece, Point Place)> freeEnds, LocalFrame frame, JoinGap gap, string unread)
+    {
+        var places = freeEnds.Select(e => new EntityPlace(e.Piece.Entity.Source, frame.ToDrawing(e.Place))).ToImmutableArray();
+        var distance = freeEnds[0].Place.DistanceTo(freeEnds[1].Place) / frame.Scale;
+        var joining = RoundedUp(distance);
+        double? tolerance = joining * frame.Scale < gap.Shortest ? joining : null;
+        var (a, b) = (places[0], places[1]);
+        var more = places.Length > 2 ? $" There are {places.Length} free ends in all." : "";
+        var remedy = tolerance is { } t
+            ? $"Join them in the drawing, or allow the gap with --tolerance {t.ToString(CultureInfo.InvariantCulture)}."
+            : "Draw what is missing between them.";
+        return new DrawingException(
+            DrawingFault.OpenBoundary,
+            $"A boundary is open: {a.Source} ends freely at {Wording.At(a.Point!.Value)}; the nearest free end, of {b.Source} at " +
+            $"{Wording.At(b.Point!.Value)}, is {Wording.Distance(distance)} away, and ends are joined up to " +
+            $"{Wording.Distance(gap.Length / frame.Scale)}.{more} {remedy} If they are no part of the outline, delete them or " +
+            $"choose the layers of the outline with --layer.{unread}")
+        { Places = places, Distance = distance, Tolerance = tolerance };
+    }
+
+    public static DrawingException Unsound(OutlineException unsound, List<Loop> loops, LocalFrame frame)
+    {
+        // The exception tells the point in the drawing's axes, in mm.
+        Point? at = unsound.Point is { } p ? p / frame.Scale : null;
+        EdgePlace?[] edges = [unsound.First, unsound.Second];
+        var places = edges
+            .Where(e => e is not null)
+            .Select(e => new EntityPlace(loops[e!.Value.Boundary].Entities[e.Value.Edge].Source, at))
+            .ToImmutableArray();
+        var where = (at is { } point ? $" at {Wording.At(point)}" : "") +
+            (places.IsEmpty ? "" : $": {Wording.Names(places.Select(q => q.Source))}");
+        var (fault, what, remedy) = unsound.Fault switch
+        {
+            OutlineFault.Empty => (DrawingFault.NoBoundary, "There is no closed boundary", "Close the outline."),
+            OutlineFault.NotFinite => (DrawingFault.ExtentsUnusable, "A coordinate is out of range", "Draw it again."),
+            OutlineFault.NoArea => (DrawingFault.NoArea, "A boundary encloses no area", "Delete it, or draw it with its true width."),
+            OutlineFault.SelfCrossing => (DrawingFault.SelfCrossing, "A boundary crosses itself", "Trim the edges where they cross."),
+            OutlineFault.SelfTouching => (DrawingFault.SelfTouching, "A boundary touches itself", "Move the edges apart, or draw two boundaries."),
+            OutlineFault.Crossing => (DrawingFault.CrossingBoundaries, "Two boundaries cross", "Trim them where they cross, or leave one out with --layer."),
+            OutlineFault.Touching => (DrawingFault.TouchingBoundaries, "Two boundaries touch", "Draw what is one piece as one boundary, or move them apart."),
+            OutlineFault.Duplicate => (DrawingFault.DuplicateBoundary, "The same boundary is there twice", "Delete one of the two."),
+            _ => throw new InvalidOperationException($"No message for {unsound.Fault}.", unsound),
+        };
+        return new DrawingException(fault, $"{what}{where}. {remedy}") { Places = places };
+    }
+
+    /// <summary>A sentence about the entities not read, for when something is missing; empty if there are none.</summary>
+    public static string Unread(EntitySelection selection) => string.Concat(selection.LeftOut
+        .Where(c => c.Reason == LeftOutReason.KindNotRead)
+        .GroupBy(c => c.Kind)
+        .Select(g => $" {g.Sum(c => c.Count)} {g.Key} not read: if they are part of the outline, {EntityKinds.Advice(g.Key)}."));
+
+    private static string Described(EntityCount c) => $"{c.Count} {c.Kind} on '{c.Layer}' ({Reason(c.Reason)})";
+
+    private static string Reason(LeftOutReason reason) => reason switch
+    {
+        LeftOutReason.None => "used",
+        LeftOutReason.Annotation => "bounds nothing",
+        LeftOutReason.KindNotRead => "not read",
+        LeftOutReason.LayerNotAsked => "layer not asked for",
+        LeftOutReason.LayerOff => "layer off",
+        LeftOutReason.LayerFrozen => "layer frozen",
+        LeftOutReason.LayerNotPlotted => "layer not plotted",
+        LeftOutReason.PaperSpace => "on a layout sheet",
+        LeftOutReason.Invisible => "invisible",
+        _ => throw new ArgumentOutOfRangeException(nameof(reason)),
+    };
+
+    private static string Size(Box box, LengthUnit unit) =>
+        $"{Wording.Distance(box.Width * unit.Millimetres)} x {Wording.Distance(box.Height * unit.Millimetres)} mm";
+
+    /// <summary>A little more than a distance, in two digits.</summary>
+    private static double RoundedUp(double distance)
+    {
+        if (distance == 0)
+        {
+            return 0;
+        }
+
+        var text = (1.05 * distance).ToString("E1", CultureInfo.InvariantCulture);
+        return double.Parse(text, CultureInfo.InvariantCulture);
+    }
+}

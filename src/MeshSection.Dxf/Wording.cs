@@ -1,0 +1,28 @@
+using System.Globalization;
+using MeshSection.Dxf.Entities;
+using MeshSection.Geometry;
+
+namespace MeshSection.Dxf;
+
+/// <summary>How numbers and entities are put in messages.</summary>
+internal static class Wording
+{
+    /// <summary>A coordinate: ten digits, so that rounding in the last ones does not show.</summary>
+    public static string Coordinate(double value) =>
+        (value + 0.0).ToString("G10", CultureInfo.InvariantCulture);
+
+    public static string At(Point p) => $"({Coordinate(p.X)}, {Coordinate(p.Y)})";
+
+    /// <summary>A distance: four digits.</summary>
+    public static string Distance(double value) => value.ToString("G4", CultureInfo.InvariantCulture);
+
+    /// <summary>The entities by name, each once, at most five, and their layers.</summary>
+    public static string Names(IEnumerable<EntitySource> sources)
+    {
+        var distinct = sources.Distinct().ToList();
+        var names = string.Join(", ", distinct.Take(5).Select(s => s.Name));
+        var layers = distinct.Select(s => s.Layer).Distinct(StringComparer.OrdinalIgnoreCase).Take(3).ToList();
+        var more = distinct.Count > 5 ? $" and {distinct.Count - 5} more" : "";
+        return $"{names}{more} on layer{(layers.Count > 1 ? "s" : "")} '{string.Join("', '", layers)}'";
+    }
+}

@@ -3,7 +3,10 @@ using MeshSection.Geometry;
 
 namespace MeshSection.Sections.Shapes;
 
-/// <summary>A polygon of equal sides and angles, such as a hexagon bar. The origin is its centre; one side lies level at the bottom.</summary>
+/// <summary>
+/// A polygon of equal sides and angles, such as a hexagon bar. The origin is its centre; one side lies level at the
+/// bottom.
+/// </summary>
 /// <param name="Sides">How many sides, 3 to 360.</param>
 /// <param name="AcrossFlats">
 /// Diameter of the circle that touches every side, mm: for an even number of sides the distance between two opposite

@@ -25,7 +25,11 @@ internal static class ShapeCheck
     /// two arcs touch, on the line through their centres, at an outer radius of t1 + t2 + r + √(2 t1 t2).
     /// </summary>
     public static void Bend(
-        double outerRadius, double innerRadius, double wall1, double wall2, [CallerArgumentExpression(nameof(outerRadius))] string name = "") =>
+        double outerRadius,
+        double innerRadius,
+        double wall1,
+        double wall2,
+        [CallerArgumentExpression(nameof(outerRadius))] string name = "") =>
         Below(outerRadius, wall1 + wall2 + innerRadius + Math.Sqrt(2 * wall1 * wall2), name);
 
     private static void Require(bool holds, double value, ShapeBound bound, double limit, string name)

@@ -53,14 +53,21 @@ public sealed class ShapeException : Exception
     /// <summary>The bound, given the other dimensions, in the unit of the value; 0 where the kind has none.</summary>
     public double Limit { get; }
 
-    private static string Text(string parameter, double value, ShapeBound bound, double limit) => bound switch
+    private static string Text(string parameter, double value, ShapeBound bound, double limit)
     {
-        ShapeBound.Finite => string.Create(CultureInfo.InvariantCulture, $"{parameter} is {value}: it must be a finite number."),
-        ShapeBound.Above => string.Create(CultureInfo.InvariantCulture, $"{parameter} is {value}: it must be greater than {limit:g6}."),
-        ShapeBound.AtLeast => string.Create(CultureInfo.InvariantCulture, $"{parameter} is {value}: it must be at least {limit:g6}."),
-        ShapeBound.Below => string.Create(CultureInfo.InvariantCulture, $"{parameter} is {value}: it must be less than {limit:g6}."),
-        ShapeBound.AtMost => string.Create(CultureInfo.InvariantCulture, $"{parameter} is {value}: it must be at most {limit:g6}."),
-        ShapeBound.Distinct => $"{parameter} repeats the point before it.",
-        _ => throw new ArgumentOutOfRangeException(nameof(bound)),
-    };
+        var wanted = bound switch
+        {
+            ShapeBound.Finite => "a finite number",
+            ShapeBound.Above => Number("greater than", limit),
+            ShapeBound.AtLeast => Number("at least", limit),
+            ShapeBound.Below => Number("less than", limit),
+            ShapeBound.AtMost => Number("at most", limit),
+            ShapeBound.Distinct => "another point than the one before it",
+            _ => throw new ArgumentOutOfRangeException(nameof(bound)),
+        };
+        return $"{Number($"{parameter} is", value)}: it must be {wanted}.";
+    }
+
+    private static string Number(string words, double number) =>
+        string.Create(CultureInfo.InvariantCulture, $"{words} {number:g6}");
 }

@@ -1,0 +1,65 @@
+using System.Text.Encodings.Web;
+using System.Text.Json;
+using MeshSection.Dxf.Units;
+using MeshSection.Geometry;
+
+namespace MeshSection.Files.Results;
+
+/// <summary>Writes results as JSON objects, lengths in the unit that they are shown in.</summary>
+internal readonly struct ResultWriter(Utf8JsonWriter json, LengthUnit unit)
+{
+    private readonly Scale _scale = new(unit);
+
+    public Utf8JsonWriter Json { get; } = json;
+
+    /// <summary>Writes one object to a stream, indented, with a line end behind it.</summary>
+    public static void Document(Stream stream, Action<Utf8JsonWriter> write)
+    {
+        var options = new JsonWriterOptions
+        {
+            Indented = true,
+            NewLine = "\n",
+            Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
+        };
+        using (var json = new Utf8JsonWriter(stream, options))
+        {
+            write(json);
+        }
+
+        stream.WriteByte((byte)'\n');
+    }
+
+    public void Object(string key, Action write)
+    {
+        Json.WriteStartObject(key);
+        write();
+        Json.WriteEndObject();
+    }
+
+    public void Units(LengthUnit length)
+    {
+        Json.WriteStartObject("units");
+        Json.WriteString("length", length.Symbol);
+        Json.WriteString("mass", "kg");
+        Json.WriteString("angle", "deg");
+        Json.WriteEndObject();
+    }
+
+    /// <summary>A number in mm to a power; 0 for one without unit.</summary>
+    public void Number(string key, double value, int power = 0) => Json.WriteNumber(key, _scale.Of(value, power));
+
+    public void PerLength(string key, double value) => Json.WriteNumber(key, _scale.PerLength(value));
+
+    public void Point(string key, Point point)
+    {
+        Json.WriteStartObject(key);
+        Coordinates(point);
+        Json.WriteEndObject();
+    }
+
+    public void Coordinates(Point point)
+    {
+        Number("x", point.X, 1);
+        Number("y", point.Y, 1);
+    }
+}

@@ -1,0 +1,49 @@
+namespace MeshSection.Files.Tree;
+
+/// <summary>Guesses which of the known words was meant.</summary>
+internal static class NearestWord
+{
+    /// <summary>The known word that takes the fewest changes of a letter, if they are few for its length; else null.</summary>
+    public static string? Find(string word, IEnumerable<string> known)
+    {
+        var (nearest, least) = ((string?)null, int.MaxValue);
+        foreach (var candidate in known)
+        {
+            var changes = Changes(word.ToUpperInvariant(), candidate.ToUpperInvariant());
+            if (changes < least)
+            {
+                (nearest, least) = (candidate, changes);
+            }
+        }
+
+        return nearest is not null && least <= Math.Max(1, nearest.Length / 3) ? nearest : null;
+    }
+
+    /// <summary>"Did you mean …?", or all that is known.</summary>
+    public static string Advice(string word, IReadOnlyCollection<string> known) =>
+        Find(word, known) is { } nearest ? $"Did you mean \"{nearest}\"?" : $"Known here: {string.Join(", ", known)}.";
+
+    // Levenshtein's distance, one row at a time.
+    private static int Changes(string a, string b)
+    {
+        var row = new int[b.Length + 1];
+        for (var j = 0; j <= b.Length; j++)
+        {
+            row[j] = j;
+        }
+
+        for (var i = 1; i <= a.Length; i++)
+        {
+            var diagonal = row[0];
+            row[0] = i;
+            for (var j = 1; j <= b.Length; j++)
+            {
+                var replaced = diagonal + (a[i - 1] == b[j - 1] ? 0 : 1);
+                diagonal = row[j];
+                row[j] = Math.Min(replaced, 1 + Math.Min(row[j], row[j - 1]));
+            }
+        }
+
+        return row[b.Length];
+    }
+}

@@ -1,11 +1,8 @@
-using System.Collections.Immutable;
-using MeshSection.Geometry;
 using MeshSection.Meshing;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Layout;
 using MeshSection.Properties;
 using MeshSection.Sections;
-using OxyPlot;
 
 namespace MeshSection.Plots;
 
@@ -15,7 +12,6 @@ namespace MeshSection.Plots;
 /// </summary>
 public static class SectionFigure
 {
-    private static readonly Stroke Boundary = new(Palette.Ink, 3.2);
     private static readonly Stroke Extension = new(Palette.Rule, 1.6);
 
     /// <summary>Lays the picture out.</summary>
@@ -38,23 +34,17 @@ public static class SectionFigure
         var axes = new CentroidalAxes(outline.Bounds, properties.Centroid - outline.Origin, properties.Principal);
 
         var sheet = new Sheet(size ?? PictureSize.Standard);
-        if (section.Title.Length > 0)
-        {
-            Heading.Add(sheet, section.Title);
-        }
+        Heading.Add(sheet, section.Title);
 
         var panel = new Panel(KeyValues.Of(properties, unit).AddRange(axes.Legend()).Add(GoverningSign.Legend()));
-        panel.Add(sheet, area => frame.ViewIn(area with { MaxY = area.MaxY - ScaleBar.Height }).Scale);
-        var bar = sheet.Free;
-        sheet.Free = bar with { MaxY = bar.MaxY - ScaleBar.Height };
-        var view = frame.ViewIn(sheet.Free);
-        sheet.Free = bar;
+        panel.Add(sheet, area => frame.ViewIn(ScaleBar.Above(area)).Scale);
+        var view = frame.ViewIn(ScaleBar.Above(sheet.Free));
         ScaleBar.Add(sheet, view.Scale, unit, lengths.Note);
 
         frame.AddExtensions(sheet, view, Extension);
-        AddRegions(sheet, outline, view);
+        OutlineMarks.AddRegions(sheet, outline, view);
         sheet.Add(MeshMarks.InnerEdges(mesh, view));
-        AddBoundaries(sheet, outline, view);
+        OutlineMarks.AddBoundaries(sheet, outline, view);
         frame.AddDimensions(sheet, view);
         axes.Add(sheet, view);
         foreach (var fibre in GoverningSign.Fibres(properties))
@@ -63,20 +53,5 @@ public static class SectionFigure
         }
 
         return sheet.ToFigure();
-    }
-
-    private static void AddRegions(Sheet sheet, Outline outline, View view)
-    {
-        foreach (var region in outline.Boundaries.GroupBy(b => b.Region))
-        {
-            ImmutableArray<ScreenPoint[]> loops = [.. region.Select(b => view.Of(b.Boundary))];
-            sheet.Add(new Area(loops, Palette.Tint(region.Key), Stroke.None));
-        }
-    }
-
-    private static void AddBoundaries(Sheet sheet, Outline outline, View view)
-    {
-        ImmutableArray<ScreenPoint[]> loops = [.. outline.Boundaries.Select(b => view.Of(b.Boundary))];
-        sheet.Add(new Area(loops, OxyColors.Undefined, Boundary));
     }
 }

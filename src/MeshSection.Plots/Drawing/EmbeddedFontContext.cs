@@ -22,6 +22,11 @@ internal sealed class EmbeddedFontContext : SkiaRenderContext, IRenderContext
         VerticalAlignment verticalAlignment = VerticalAlignment.Top,
         OxySize? maxSize = null)
     {
+        if (string.IsNullOrEmpty(text))
+        {
+            return;
+        }
+
         using var font = Typefaces.Font(Typefaces.OfWeight(fontWeight), fontSize * DpiScale);
         using var paint = new SKPaint { Color = fill.ToSKColor(), IsAntialias = true };
         var metrics = font.Metrics;

@@ -52,7 +52,7 @@ internal static class DimensionLine
     /// <summary>A line from top to bottom; the text along it, or level and beside it where there is no room.</summary>
     /// <param name="sheet">Where to draw.</param>
     /// <param name="x">Where the line stands.</param>
-    /// <param name="textAtLeft">The side of the line on which level text stands.</param>
+    /// <param name="textAtLeft">The side of the line on which the text stands.</param>
     /// <param name="chain">The dimensions, from the top.</param>
     public static void AddVertical(Sheet sheet, double x, bool textAtLeft, params ReadOnlySpan<Dimension> chain)
     {
@@ -64,7 +64,7 @@ internal static class DimensionLine
             AddTick(sheet, x, d.To);
             var middle = 0.5 * (d.From + d.To);
             var half = 0.5 * d.Lettering.Height + 2;
-            var along = new Label(d.Inscription, new ScreenPoint(x - half, middle), d.Lettering, false);
+            var along = new Label(d.Inscription, new ScreenPoint(textAtLeft ? x - half : x + half, middle), d.Lettering, false);
             var level = chain.Length == 1 ? middle : i == 0 ? Math.Min(middle, d.To - half) : Math.Max(middle, d.From + half);
             var beside = textAtLeft
                 ? Label.RightAt(d.Inscription, x - Tick - TextGap, level, d.Lettering)

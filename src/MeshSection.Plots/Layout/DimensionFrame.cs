@@ -1,6 +1,7 @@
 using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 using MeshSection.Properties;
+using OxyPlot;
 
 namespace MeshSection.Plots.Layout;
 
@@ -11,7 +12,8 @@ namespace MeshSection.Plots.Layout;
 internal sealed class DimensionFrame(Outline outline, SectionProperties properties, LengthScale lengths)
 {
     /// <summary>How far the dimension lines stand off the section; the axes and their names lie in between.</summary>
-    private const double Offset = 112;
+    private const double SideOffset = 128;
+    private const double Offset = 100;
 
     private const double Overshoot = 12;
 
@@ -31,7 +33,7 @@ internal sealed class DimensionFrame(Outline outline, SectionProperties properti
     {
         var box = view.Of(bounds);
         var c = view.Of(centroid);
-        var (left, right) = (box.MinX - Offset - Overshoot, box.MaxX + Offset + Overshoot);
+        var (left, right) = (box.MinX - SideOffset - Overshoot, box.MaxX + SideOffset + Overshoot);
         var (top, bottom) = (box.MinY - Offset - Overshoot, box.MaxY + Offset + Overshoot);
         foreach (var y in (double[])[box.MinY, box.MaxY])
         {
@@ -51,15 +53,36 @@ internal sealed class DimensionFrame(Outline outline, SectionProperties properti
     {
         var box = view.Of(bounds);
         var (top, bottom, left, right, height, width) = Chains(view);
-        DimensionLine.AddVertical(sheet, box.MinX - Offset, true, top, bottom);
-        DimensionLine.AddVertical(sheet, box.MaxX + Offset, false, height);
+        DimensionLine.AddVertical(sheet, box.MinX - SideOffset, true, top, bottom);
+        DimensionLine.AddVertical(sheet, box.MaxX + SideOffset, false, height);
         DimensionLine.AddHorizontal(sheet, box.MaxY + Offset, left, right);
         DimensionLine.AddHorizontal(sheet, box.MinY - Offset, width);
+        KeepLines(sheet, box, view.Of(centroid));
+    }
+
+    /// <summary>Keeps the names of the axes off the section and the lines around it.</summary>
+    private static void KeepLines(Sheet sheet, Box box, ScreenPoint c)
+    {
+        var around = new Box(
+            box.MinX - SideOffset - Overshoot, box.MinY - Offset - Overshoot, box.MaxX + SideOffset, box.MaxY + Offset + Overshoot);
+        sheet.Keep(box);
+        foreach (var y in (double[])[box.MinY, box.MaxY, box.MinY - Offset, box.MaxY + Offset])
+        {
+            sheet.Keep(around with { MinY = y, MaxY = y });
+        }
+
+        foreach (var x in (double[])[box.MinX, box.MaxX, box.MinX - SideOffset, box.MaxX + SideOffset])
+        {
+            sheet.Keep(around with { MinX = x, MaxX = x });
+        }
+
+        sheet.Keep(around with { MinY = c.Y, MaxY = c.Y, MaxX = box.MinX });
+        sheet.Keep(around with { MinX = c.X, MaxX = c.X, MinY = box.MaxY });
     }
 
     private static Box Inner(Box area, double sideText)
     {
-        var side = Offset + Overshoot + sideText;
+        var side = SideOffset + Overshoot + sideText;
         var foot = Offset + Overshoot;
         var head = Offset + Lettering.Body.Height + 4;
         return new Box(area.MinX + side, area.MinY + head, area.MaxX - side, area.MaxY - foot);

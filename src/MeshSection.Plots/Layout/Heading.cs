@@ -13,7 +13,13 @@ internal static class Heading
     {
         var free = sheet.Free;
         var y = free.MinY;
-        foreach (var (text, lettering) in Lines(OneLine(title), free.Width))
+        var line = OneLine(title);
+        if (line.Length == 0)
+        {
+            return;
+        }
+
+        foreach (var (text, lettering) in Lines(line, free.Width))
         {
             sheet.Add(Label.LeftAt(text, free.MinX, y + 0.5 * lettering.Height, lettering));
             y += lettering.Height;
@@ -70,9 +76,9 @@ internal static class Heading
         var line = new StringBuilder();
         foreach (var word in title.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries))
         {
-            line.Append(line.Length > 0 ? " " : "").Append(string.Concat(word.Where(c => !char.IsControl(c))));
+            line.Append(string.Concat(word.Where(c => !char.IsControl(c)))).Append(' ');
         }
 
-        return line.ToString();
+        return line.ToString().Trim();
     }
 }

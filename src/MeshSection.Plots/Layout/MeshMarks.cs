@@ -18,6 +18,9 @@ internal static class MeshMarks
     public static ScreenPoint[] Triangle(Mesh mesh, View view, int triangle) =>
         [.. Enumerable.Range(0, 3).Select(k => view.Of(mesh.Nodes[mesh.Corners[3 * triangle + k]]))];
 
+    /// <summary>The centroid of three points.</summary>
+    public static ScreenPoint Middle(ScreenPoint[] triangle) => new(triangle.Average(p => p.X), triangle.Average(p => p.Y));
+
     private static Segments EdgesOf(Mesh mesh, View view, bool isOnOutline, Stroke stroke)
     {
         var ends = new List<ScreenPoint>();

@@ -45,7 +45,10 @@ internal sealed record ValueRow(string Symbol, string Index, string Remark, stri
             sheet.Add(Label.LeftAt(Remark, end + Space, y, Lettering.Small));
         }
 
-        sheet.Add(Label.RightAt(Value, x + width, y, Lettering.Body));
+        if (Value.Length > 0)
+        {
+            sheet.Add(Label.RightAt(Value, x + width, y, Lettering.Body));
+        }
     }
 }
 

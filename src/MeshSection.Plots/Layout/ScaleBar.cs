@@ -1,3 +1,4 @@
+using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 
 namespace MeshSection.Plots.Layout;
@@ -5,10 +6,12 @@ namespace MeshSection.Plots.Layout;
 /// <summary>A bar of a round length at the foot of the drawing, with the unit that lengths are stated in.</summary>
 internal static class ScaleBar
 {
-    /// <summary>How much of the foot it takes.</summary>
-    public const double Height = 44;
+    private const double Height = 52;
 
-    private const double Longest = 260;
+    private const double Longest = 320;
+
+    /// <summary>The part of a box that the bar leaves at its foot.</summary>
+    public static Box Above(Box area) => area with { MaxY = area.MaxY - Height };
 
     public static void Add(Sheet sheet, double unitsPerMillimetre, DisplayUnit unit, string note)
     {
@@ -23,7 +26,7 @@ internal static class ScaleBar
         var text = $"{Numbers.Format(length)} {unit.Symbol}";
         sheet.Add(Label.LeftAt(text, right + 14, y, Lettering.Body));
         sheet.Add(Label.LeftAt(note, right + 14 + Lettering.Body.Width(text) + 36, y, Lettering.Small));
-        sheet.Free = sheet.Free with { MaxY = sheet.Free.MaxY - Height };
+        sheet.Free = Above(sheet.Free);
     }
 
     /// <summary>The greatest 1, 2 or 5 times a power of ten that is no longer than asked for.</summary>

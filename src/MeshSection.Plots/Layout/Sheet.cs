@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
+using OxyPlot;
 
 namespace MeshSection.Plots.Layout;
 
@@ -10,6 +11,11 @@ internal sealed class Sheet
     public const double Margin = 40;
 
     private const double LabelGap = 3;
+    private const int Rings = 24;
+
+    private static readonly (int X, int Y)[] Ways =
+        [(0, 1), (0, -1), (1, 0), (-1, 0), (1, 1), (-1, 1), (1, -1), (-1, -1)];
+
 
     private readonly PictureSize size;
     private readonly ImmutableArray<Mark>.Builder marks = ImmutableArray.CreateBuilder<Mark>();
@@ -43,42 +49,58 @@ internal sealed class Sheet
         }
     }
 
+    /// <summary>Adds a label on a piece of blank paper, so that it reads across lines.</summary>
+    public void AddOnPaper(Label label)
+    {
+        var box = label.Box.Grown(2);
+        ScreenPoint[] corners =
+            [new(box.MinX, box.MinY), new(box.MaxX, box.MinY), new(box.MaxX, box.MaxY), new(box.MinX, box.MaxY)];
+        Add(new Area([corners], Palette.Paper, Stroke.None));
+        Add(label);
+    }
+
     /// <summary>Keeps labels that are placed later out of a box.</summary>
     public void Keep(Box box) => taken.Add(box);
 
+    /// <summary>Adds the label that <see cref="Find"/> finds, if there is one.</summary>
+    public void Place(params ReadOnlySpan<Label> candidates)
+    {
+        if (Find(candidates) is { } label)
+        {
+            Add(label);
+        }
+    }
+
     /// <summary>
-    /// Adds the first of the candidates that stands free; if none does, the first one moved up or down, then sideways,
-    /// by as little as need be.
+    /// The first of the candidates that stands free; if none does, the first one moved up or down, then sideways, by as
+    /// little as need be; null if there is no free place anywhere near.
     /// </summary>
-    /// <returns>False if there is no free place anywhere near; the label is then left out.</returns>
-    public bool Place(params ReadOnlySpan<Label> candidates)
+    public Label? Find(params ReadOnlySpan<Label> candidates)
     {
         foreach (var candidate in candidates)
         {
             if (IsFree(candidate.Box))
             {
-                Add(candidate);
-                return true;
+                return candidate;
             }
         }
 
         var first = candidates[0];
         var step = 0.5 * first.Lettering.Height;
-        for (var ring = 1; ring <= 24; ring++)
+        for (var ring = 1; ring <= Rings; ring++)
         {
-            foreach (var (x, y) in (ReadOnlySpan<(int, int)>)[(0, 1), (0, -1), (1, 0), (-1, 0), (1, 1), (-1, 1), (1, -1), (-1, -1)])
+            foreach (var (x, y) in Ways)
             {
-                var centre = new OxyPlot.ScreenPoint(first.Centre.X + x * ring * step, first.Centre.Y + y * ring * step);
+                var centre = new ScreenPoint(first.Centre.X + x * ring * step, first.Centre.Y + y * ring * step);
                 var moved = first with { Centre = centre };
                 if (IsFree(moved.Box))
                 {
-                    Add(moved);
-                    return true;
+                    return moved;
                 }
             }
         }
 
-        return false;
+        return null;
     }
 
     public Figure ToFigure() => new(size, marks.ToImmutable());

@@ -1,0 +1,117 @@
+using System.Collections.Immutable;
+using MeshSection.Geometry;
+using MeshSection.Meshing;
+using MeshSection.Plots.Drawing;
+using MeshSection.Plots.Layout;
+using MeshSection.Sections;
+using OxyPlot;
+
+namespace MeshSection.Plots;
+
+/// <summary>The picture of a mesh: its triangles, the smallest angle, and whatever was left unrefined.</summary>
+public static class MeshFigure
+{
+    private static readonly Stroke Leader = new(Palette.Orange, 2);
+
+    /// <summary>Lays the picture out.</summary>
+    /// <param name="section">The section that was meshed; its title heads the picture.</param>
+    /// <param name="mesh">Its mesh.</param>
+    /// <param name="unit">The unit for every number on the picture.</param>
+    /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
+    public static Figure Of(Section section, Mesh mesh, DisplayUnit unit, PictureSize? size = null)
+    {
+        ArgumentNullException.ThrowIfNull(section);
+        ArgumentNullException.ThrowIfNull(mesh);
+        ArgumentNullException.ThrowIfNull(unit);
+        var outline = section.Outline;
+        var quality = MeshQuality.Of(mesh);
+
+        var sheet = new Sheet(size ?? PictureSize.Standard);
+        Heading.Add(sheet, section.Title);
+        new Panel(Rows(mesh, quality, unit)).Add(sheet, area => View.ScaleFor(outline.Bounds, Inner(area)));
+        var view = View.Fit(outline.Bounds, Inner(sheet.Free));
+        var lengths = new LengthScale(unit, Math.Max(outline.Bounds.Width, outline.Bounds.Height));
+        ScaleBar.Add(sheet, view.Scale, unit, $"{lengths.Format(outline.Bounds.Width)} × {lengths.Format(outline.Bounds.Height)}, {lengths.Note}");
+
+        OutlineMarks.AddRegions(sheet, outline, view);
+        AddUnrefined(sheet, mesh, view);
+        sheet.Add(new Area([MeshMarks.Triangle(mesh, view, quality.Sharpest)], Palette.Orange, Stroke.None));
+        sheet.Add(MeshMarks.InnerEdges(mesh, view));
+        sheet.Add(MeshMarks.OutlineEdges(mesh, view));
+        AddSharpest(sheet, mesh, view, quality);
+        return sheet.ToFigure();
+    }
+
+    /// <summary>Room for the mesh, with the angle's text at either side.</summary>
+    private static Box Inner(Box area)
+    {
+        var above = ScaleBar.Above(area);
+        return new Box(above.MinX + 130, above.MinY + 10, above.MaxX - 130, above.MaxY - 20);
+    }
+
+    private static ImmutableArray<PanelRow> Rows(Mesh mesh, MeshQuality quality, DisplayUnit unit)
+    {
+        string Size(double area) => $"{Numbers.Format(unit.Convert(area, 2))} {unit.PowerOf(2)}";
+        var rows = ImmutableArray.CreateBuilder<PanelRow>();
+        rows.Add(new ValueRow("Triangles", "", "", Numbers.Count(mesh.TriangleCount)));
+        rows.Add(new ValueRow("Nodes", "", "", Numbers.Count(mesh.Nodes.Length)));
+        rows.Add(new ValueRow("Smallest angle", "", "", KeyValues.Angle(quality.LeastAngle)));
+        rows.Add(new ValueRow("Largest angle", "", "", KeyValues.Angle(quality.GreatestAngle)));
+        rows.Add(new ValueRow("Smallest triangle", "", "", Size(quality.LeastArea)));
+        rows.Add(new ValueRow("Largest triangle", "", "", Size(quality.GreatestArea)));
+        rows.Add(new LegendRow(p => [new Disc(p, 11, OxyColors.Undefined, Leader)], "smallest angle"));
+        foreach (var cause in mesh.Unrefined.GroupBy(u => u.Cause).OrderBy(g => g.Key))
+        {
+            rows.Add(new LegendRow(p => [UnrefinedSign(p)], $"{Numbers.Count(cause.Count())} unrefined: {Words(cause.Key)}"));
+        }
+
+        return rows.ToImmutable();
+    }
+
+    private static void AddUnrefined(Sheet sheet, Mesh mesh, View view)
+    {
+        if (mesh.Unrefined.IsEmpty)
+        {
+            return;
+        }
+
+        ImmutableArray<ScreenPoint[]> triangles = [.. mesh.Unrefined.Select(u => MeshMarks.Triangle(mesh, view, u.Triangle))];
+        sheet.Add(new Area(triangles, Palette.Blue, Stroke.None));
+        foreach (var triangle in triangles)
+        {
+            sheet.Add(UnrefinedSign(MeshMarks.Middle(triangle)));
+        }
+    }
+
+    private static void AddSharpest(Sheet sheet, Mesh mesh, View view, MeshQuality quality)
+    {
+        var triangle = MeshMarks.Triangle(mesh, view, quality.Sharpest);
+        var middle = MeshMarks.Middle(triangle);
+        var radius = Math.Max(14, 5 + triangle.Max(p => p.DistanceTo(middle)));
+        sheet.Add(new Disc(middle, radius, OxyColors.Undefined, Leader));
+
+        // The angle stands beside the section, level with its triangle.
+        var text = KeyValues.Angle(quality.LeastAngle);
+        var lettering = Lettering.Strong with { Colour = Palette.Orange };
+        var right = 0.5 * (sheet.Free.MinX + sheet.Free.MaxX) < middle.X;
+        var x = right ? sheet.Free.MaxX - 0.5 * lettering.Width(text) : sheet.Free.MinX + 0.5 * lettering.Width(text);
+        if (sheet.Find(new Label(text, new ScreenPoint(x, middle.Y), lettering)) is { } label)
+        {
+            var start = right ? middle.X + radius : middle.X - radius;
+            var end = right ? label.Box.MinX - 8 : label.Box.MaxX + 8;
+            sheet.Add(new Polyline(Leader, new(start, middle.Y), new(end, label.Centre.Y)));
+            sheet.Add(label);
+        }
+    }
+
+    private static Disc UnrefinedSign(ScreenPoint p) => new(p, 6, Palette.Blue, new Stroke(Palette.Paper, 1.5));
+
+    private static string Words(UnrefinedCause cause) => cause switch
+    {
+        UnrefinedCause.InputAngle => "sharp corner of the outline",
+        UnrefinedCause.NodeLimit => "limit on nodes reached",
+        UnrefinedCause.LeastEdge => "edges too short to halve",
+        _ => throw new ArgumentOutOfRangeException(nameof(cause), cause, null),
+    };
+}

@@ -71,6 +71,12 @@ public sealed class BoundaryIntegrator(Outline outline) : IIntegrator
 
         void AddPiece(Edge piece)
         {
+            if (piece.Start == piece.End)
+            {
+                // Two crossings nearer than the coordinates can tell, at a curve that grazes the line.
+                return;
+            }
+
             var d0 = Math.Max(0, normal.Dot(piece.Start) - offset);
             var d1 = Math.Max(0, normal.Dot(piece.End) - offset);
             var ds = along.Dot(piece.Chord);

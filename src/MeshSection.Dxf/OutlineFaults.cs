@@ -156,8 +156,13 @@ internal static class OutlineFaults
         _ => throw new ArgumentOutOfRangeException(nameof(reason)),
     };
 
-    private static string Size(Box box, LengthUnit unit) =>
-        $"{Wording.Distance(box.Width * unit.Millimetres)} x {Wording.Distance(box.Height * unit.Millimetres)} mm";
+    private static string Size(Box box, LengthUnit unit)
+    {
+        var (width, height) = (box.Width * unit.Millimetres, box.Height * unit.Millimetres);
+        return Math.Max(width, height) < 1e4
+            ? $"{Wording.Distance(width)} x {Wording.Distance(height)} mm"
+            : $"{Wording.Distance(width / 1000)} x {Wording.Distance(height / 1000)} m";
+    }
 
     /// <summary>A little more than a distance, in two digits.</summary>
     private static double RoundedUp(double distance)

@@ -47,6 +47,7 @@ public static class SectionFileReader
     {
         var root = TreeReader.Read(json, path);
         var top = new ObjectNode(root, "a section file", TopKeys);
+        var title = top.Find("title")?.FilledText("Sill beam") ?? "";
         var unit = top.Find("units") is { } units ? BaseUnit(units) : null;
         var quantities = new QuantityReader(unit);
         var materials = top.Find("materials") is { } list ? Materials(list) : [];
@@ -63,7 +64,7 @@ public static class SectionFileReader
         return new SectionFile
         {
             Path = path,
-            Title = top.Find("title")?.FilledText("Sill beam") ?? "",
+            Title = title,
             Unit = unit,
             Drawing = drawing is null ? null : Drawing(drawing, quantities, path),
             Outline = shapes is null ? null : OutlineOf(shapes, quantities),

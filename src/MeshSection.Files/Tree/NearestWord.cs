@@ -16,7 +16,7 @@ internal static class NearestWord
             }
         }
 
-        return nearest is not null && least <= Math.Max(1, nearest.Length / 3) ? nearest : null;
+        return nearest is not null && least <= (nearest.Length + 1) / 3 ? nearest : null;
     }
 
     /// <summary>"Did you mean …?", or all that is known.</summary>

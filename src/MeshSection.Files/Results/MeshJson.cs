@@ -1,0 +1,70 @@
+using System.Text.Json;
+using MeshSection.Dxf.Units;
+using MeshSection.Geometry;
+using MeshSection.Meshing;
+
+namespace MeshSection.Files.Results;
+
+/// <summary>
+/// What there is to say of a mesh as JSON: counts, extreme angles, the area of each region, and the triangles that
+/// could not be given the quality asked for.
+/// </summary>
+public static class MeshJson
+{
+    /// <summary>Writes a document: one indented object and a line end.</summary>
+    /// <param name="stream">Where to; left open.</param>
+    /// <param name="mesh">The mesh, in local coordinates.</param>
+    /// <param name="origin">Where the local origin lies in the drawing's axes, mm.</param>
+    /// <param name="unit">The unit of length to write in.</param>
+    public static void Write(Stream stream, Mesh mesh, Point origin, LengthUnit unit) =>
+        ResultWriter.Document(stream, json => Write(json, mesh, origin, unit));
+
+    /// <summary>Writes one object.</summary>
+    /// <param name="json">Where to; at a place where an object may begin.</param>
+    /// <param name="mesh">The mesh, in local coordinates.</param>
+    /// <param name="origin">Where the local origin lies in the drawing's axes, mm.</param>
+    /// <param name="unit">The unit of length to write in.</param>
+    public static void Write(Utf8JsonWriter json, Mesh mesh, Point origin, LengthUnit unit)
+    {
+        var writer = new ResultWriter(json, unit);
+        var figures = MeshFigures.Of(mesh);
+        json.WriteStartObject();
+        writer.Units(unit);
+        json.WriteNumber("triangles", mesh.TriangleCount);
+        json.WriteNumber("nodes", mesh.Nodes.Length);
+        writer.Number("minAngle", figures.MinAngle);
+        writer.Number("maxAngle", figures.MaxAngle);
+        writer.Number("largestTriangle", figures.LargestTriangle, 2);
+        writer.Number("area", figures.RegionAreas.Sum(), 2);
+        json.WriteStartArray("regions");
+        foreach (var area in figures.RegionAreas)
+        {
+            json.WriteStartObject();
+            writer.Number("area", area, 2);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+        json.WriteStartArray("unrefined");
+        foreach (var triangle in mesh.Unrefined)
+        {
+            json.WriteStartObject();
+            json.WriteNumber("triangle", triangle.Triangle);
+            writer.Coordinates(origin + triangle.Place);
+            writer.Number("angle", triangle.Angle);
+            json.WriteString("cause", Cause(triangle.Cause));
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+        json.WriteEndObject();
+    }
+
+    private static string Cause(UnrefinedCause cause) => cause switch
+    {
+        UnrefinedCause.InputAngle => "inputAngle",
+        UnrefinedCause.NodeLimit => "nodeLimit",
+        UnrefinedCause.LeastEdge => "leastEdge",
+        _ => throw new ArgumentOutOfRangeException(nameof(cause)),
+    };
+}

@@ -4,13 +4,16 @@ namespace MeshSection.Meshing;
 
 /// <summary>
 /// Orientation and in-circle tests whose sign is always right [Shewchuk1997]: plain arithmetic where its error bound
-/// proves the sign, exact expansions elsewhere. Valid while no product overflows or underflows.
+/// proves the sign, then pairs of doubles, at last exact expansions. Valid while no product overflows or underflows.
 /// </summary>
 internal static class Predicates
 {
     private const double Epsilon = 1.1102230246251565e-16;
     private const double OrientationBound = (3 + 16 * Epsilon) * Epsilon;
     private const double InCircleBound = (10 + 96 * Epsilon) * Epsilon;
+
+    /// <summary>2^-96: a chain of ten operations, each wrong by 5 · 2^-106 at most, stays far below.</summary>
+    private const double DoubleWordBound = 1.2621774483536189e-29;
 
     /// <summary>Positive if a, b, c turn counter-clockwise, negative if clockwise, zero if they are collinear.</summary>
     public static double Orientation(double ax, double ay, double bx, double by, double cx, double cy)
@@ -49,7 +52,9 @@ internal static class Predicates
         double permanent = (Math.Abs(bc) + Math.Abs(cb)) * aLift
             + (Math.Abs(ca) + Math.Abs(ac)) * bLift
             + (Math.Abs(ab) + Math.Abs(ba)) * cLift;
-        return Math.Abs(det) > InCircleBound * permanent ? det : ExactInCircle(ax, ay, bx, by, cx, cy, dx, dy);
+        return Math.Abs(det) > InCircleBound * permanent
+            ? det
+            : CloseInCircle(ax, ay, bx, by, cx, cy, dx, dy, DoubleWordBound * permanent);
     }
 
     [MethodImpl(MethodImplOptions.NoInlining)]
@@ -65,6 +70,22 @@ internal static class Predicates
     }
 
     [MethodImpl(MethodImplOptions.NoInlining)]
+    private static double CloseInCircle(
+        double ax, double ay, double bx, double by, double cx, double cy, double dx, double dy, double bound)
+    {
+        DoubleWord adx = DoubleWord.Difference(ax, dx);
+        DoubleWord ady = DoubleWord.Difference(ay, dy);
+        DoubleWord bdx = DoubleWord.Difference(bx, dx);
+        DoubleWord bdy = DoubleWord.Difference(by, dy);
+        DoubleWord cdx = DoubleWord.Difference(cx, dx);
+        DoubleWord cdy = DoubleWord.Difference(cy, dy);
+        DoubleWord det = (adx * adx + ady * ady) * (bdx * cdy - cdx * bdy)
+            + (bdx * bdx + bdy * bdy) * (cdx * ady - adx * cdy)
+            + (cdx * cdx + cdy * cdy) * (adx * bdy - bdx * ady);
+        return Math.Abs(det.High) > bound ? det.High : ExactInCircle(ax, ay, bx, by, cx, cy, dx, dy);
+    }
+
+    [MethodImpl(MethodImplOptions.NoInlining)]
     private static double ExactInCircle(
         double ax, double ay, double bx, double by, double cx, double cy, double dx, double dy)
     {
@@ -76,36 +97,34 @@ internal static class Predicates
         Span<double> cdx = buffer.Slice(8, Expansion.Difference(cx, dx, buffer[8..]));
         Span<double> cdy = buffer.Slice(10, Expansion.Difference(cy, dy, buffer[10..]));
 
-        Span<double> first = stackalloc double[512];
-        Span<double> second = stackalloc double[512];
-        Span<double> sum = stackalloc double[1024];
-        int firstCount = LiftedMinor(adx, ady, bdx, bdy, cdx, cdy, first);
-        int secondCount = LiftedMinor(bdx, bdy, cdx, cdy, adx, ady, second);
-        int sumCount = Expansion.Sum(first[..firstCount], second[..secondCount], sum);
-        firstCount = LiftedMinor(cdx, cdy, adx, ady, bdx, bdy, first);
-        Span<double> det = stackalloc double[1536];
-        return Expansion.Sign(det[..Expansion.Sum(sum[..sumCount], first[..firstCount], det)]);
+        Span<double> parts = stackalloc double[96];
+        Span<double> aLift = parts[..Lift(adx, ady, parts)];
+        Span<double> bLift = parts.Slice(16, Lift(bdx, bdy, parts[16..]));
+        Span<double> cLift = parts.Slice(32, Lift(cdx, cdy, parts[32..]));
+        Span<double> bc = parts.Slice(48, Minor(bdx, bdy, cdx, cdy, parts[48..]));
+        Span<double> ca = parts.Slice(64, Minor(cdx, cdy, adx, ady, parts[64..]));
+        Span<double> ab = parts.Slice(80, Minor(adx, ady, bdx, bdy, parts[80..]));
+
+        Span<double> a = stackalloc double[2 * aLift.Length * bc.Length];
+        Span<double> b = stackalloc double[2 * bLift.Length * ca.Length];
+        Span<double> c = stackalloc double[2 * cLift.Length * ab.Length];
+        a = a[..Expansion.Product(aLift, bc, a)];
+        b = b[..Expansion.Product(bLift, ca, b)];
+        c = c[..Expansion.Product(cLift, ab, c)];
+        Span<double> sum = stackalloc double[a.Length + b.Length];
+        sum = sum[..Expansion.Sum(a, b, sum)];
+        Span<double> det = stackalloc double[sum.Length + c.Length];
+        return Expansion.Sign(det[..Expansion.Sum(sum, c, det)]);
     }
 
-    /// <summary>(x² + y²) (u·w − v·z) for vectors (x, y), (u, v), (z, w); at most 512 components.</summary>
-    private static int LiftedMinor(
-        ReadOnlySpan<double> x,
-        ReadOnlySpan<double> y,
-        ReadOnlySpan<double> u,
-        ReadOnlySpan<double> v,
-        ReadOnlySpan<double> z,
-        ReadOnlySpan<double> w,
-        Span<double> h)
+    /// <summary>x² + y²; at most 16 components.</summary>
+    private static int Lift(ReadOnlySpan<double> x, ReadOnlySpan<double> y, Span<double> h)
     {
         Span<double> xx = stackalloc double[8];
         Span<double> yy = stackalloc double[8];
-        Span<double> lift = stackalloc double[16];
-        Span<double> minor = stackalloc double[16];
         xx = xx[..Expansion.Product(x, x, xx)];
         yy = yy[..Expansion.Product(y, y, yy)];
-        lift = lift[..Expansion.Sum(xx, yy, lift)];
-        minor = minor[..Minor(u, v, z, w, minor)];
-        return Expansion.Product(lift, minor, h);
+        return Expansion.Sum(xx, yy, h);
     }
 
     /// <summary>u·w − v·z; at most 16 components.</summary>

@@ -3,8 +3,9 @@ using System.Numerics;
 namespace MeshSection.Meshing;
 
 /// <summary>
-/// Triangles that wait for refinement, in classes of urgency; within one, last in is first out, which keeps the work
-/// local. The links lie in the triangulation. A triangle that changes while it waits keeps its place.
+/// Triangles that wait for refinement, in classes of urgency. Within one, first in is first out, which needs the fewest
+/// new vertices; only in the lowest, last in is first out, which keeps the work local where the order matters little.
+/// The links lie in the triangulation. A triangle that changes while it waits keeps its place.
 /// </summary>
 internal sealed class TriangleQueue
 {
@@ -15,6 +16,7 @@ internal sealed class TriangleQueue
 
     private readonly Triangulation mesh;
     private readonly int[] heads = new int[Top + 1];
+    private readonly int[] tails = new int[Top + 1];
     private ulong low;
     private ulong high;
 
@@ -29,8 +31,17 @@ internal sealed class TriangleQueue
     {
         int link = 4 * t + 3;
         if (mesh.Twins[link] != Triangulation.NotQueued) return;
-        mesh.Twins[link] = heads[urgency];
-        heads[urgency] = t;
+        if (heads[urgency] == End || urgency == 0)
+        {
+            mesh.Twins[link] = heads[urgency];
+            heads[urgency] = t;
+        }
+        else
+        {
+            mesh.Twins[link] = End;
+            mesh.Twins[4 * tails[urgency] + 3] = t;
+        }
+        tails[urgency] = t;
         if (urgency < 64) low |= 1UL << urgency;
         else high |= 1UL << (urgency - 64);
     }

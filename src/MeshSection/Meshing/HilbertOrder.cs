@@ -5,13 +5,16 @@ namespace MeshSection.Meshing;
 /// <summary>Orders points along a Hilbert curve, so that neighbours in the order are neighbours in the plane.</summary>
 internal static class HilbertOrder
 {
-    /// <summary>Cells of the curve along each axis, as a power of two.</summary>
-    private const int Bits = 24;
+    /// <summary>Cells along each axis, as a power of two, where details may be a millionth of the whole.</summary>
+    private const int FineBits = 24;
 
-    /// <summary>The points' indices in the order in which they lie along the curve; ties by index.</summary>
+    /// <summary>Cells along each axis, as a power of two, that suffice to keep neighbours close in memory.</summary>
+    private const int CoarseBits = 16;
+
+    /// <summary>The points' indices in the order in which their cells lie along the curve; ties by index.</summary>
     /// <param name="xy">Coordinates, x of point i at 2i and y at 2i + 1.</param>
     /// <param name="count">How many points there are.</param>
-    public static int[] Along(double[] xy, int count) => Sorted(Keys(xy, count));
+    public static int[] Along(double[] xy, int count) => Sorted(Keys(xy, count, CoarseBits));
 
     /// <summary>
     /// The points' indices in rounds that double in size, each round chosen by a fixed hash and sorted along the curve:
@@ -21,17 +24,17 @@ internal static class HilbertOrder
     /// <param name="count">How many points there are.</param>
     public static int[] InRounds(double[] xy, int count)
     {
-        ulong[] keys = Keys(xy, count);
+        ulong[] keys = Keys(xy, count, FineBits);
         int rounds = BitOperations.Log2((uint)count | 1);
         for (int i = 0; i < count; i++)
         {
             int halvings = Math.Min(BitOperations.TrailingZeroCount(Hash((uint)i)), rounds);
-            keys[i] |= (ulong)(rounds - halvings) << (2 * Bits);
+            keys[i] |= (ulong)(rounds - halvings) << (2 * FineBits);
         }
         return Sorted(keys);
     }
 
-    private static ulong[] Keys(double[] xy, int count)
+    private static ulong[] Keys(double[] xy, int count, int bits)
     {
         double left = double.PositiveInfinity;
         double bottom = double.PositiveInfinity;
@@ -45,19 +48,19 @@ internal static class HilbertOrder
             top = Math.Max(top, xy[2 * i + 1]);
         }
         double size = Math.Max(right - left, top - bottom);
-        double scale = size > 0 ? ((1 << Bits) - 1) / size : 0;
+        double scale = size > 0 ? ((1 << bits) - 1) / size : 0;
         var keys = new ulong[count];
         for (int i = 0; i < count; i++)
         {
-            keys[i] = Key((uint)((xy[2 * i] - left) * scale), (uint)((xy[2 * i + 1] - bottom) * scale));
+            keys[i] = Key((uint)((xy[2 * i] - left) * scale), (uint)((xy[2 * i + 1] - bottom) * scale), bits);
         }
         return keys;
     }
 
-    private static ulong Key(uint x, uint y)
+    private static ulong Key(uint x, uint y, int bits)
     {
         ulong key = 0;
-        for (int bit = Bits - 1; bit >= 0; bit--)
+        for (int bit = bits - 1; bit >= 0; bit--)
         {
             uint right = (x >> bit) & 1;
             uint up = (y >> bit) & 1;

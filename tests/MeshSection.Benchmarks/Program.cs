@@ -1,0 +1,4 @@
+using BenchmarkDotNet.Running;
+using MeshSection.Benchmarks;
+
+BenchmarkSwitcher.FromAssembly(typeof(MeshBenchmarks).Assembly).Run(args);

@@ -18,10 +18,16 @@ public sealed class DelaunayMesher : IMesher
     /// <summary>Triangles in a refined mesh for each time that the largest one would fit into the area.</summary>
     private const double TrianglesPerFit = 2;
 
+    /// <summary>The largest coordinate, mm, of which four may be multiplied without overflow.</summary>
+    private const double LargestCoordinate = 1e60;
+
+    /// <summary>The smallest coordinate, mm, of which four may be multiplied exactly; below, it counts as 0.</summary>
+    private const double SmallestCoordinate = 1e-40;
+
     /// <inheritdoc/>
     /// <exception cref="ArgumentOutOfRangeException">A setting lies outside its range.</exception>
     /// <exception cref="ArgumentException">
-    /// A coordinate is not finite, two points are alike, a segment has no length or names a point that there is not, or
+    /// A coordinate is not finite or beyond 1e60 mm, two points are alike, a segment has no length or names a point that there is not, or
     /// segments name different regions for one place.
     /// </exception>
     public Mesh Triangulate(PlanarGraph graph, MeshSettings settings, CancellationToken cancellation = default)
@@ -33,7 +39,7 @@ public sealed class DelaunayMesher : IMesher
 
         ImmutableArray<Point> points = graph.Points;
         var mesh = new Triangulation(points.Length + 16, TriangleCapacity(graph, settings));
-        foreach (Point point in points) mesh.AddVertex(point.X, point.Y, -1);
+        foreach (Point point in points) mesh.AddVertex(Sizeable(point.X), Sizeable(point.Y), -1);
         if (PointInsertion.Run(mesh, cancellation))
         {
             SegmentInsertion.Run(mesh, graph.Segments, cancellation);
@@ -41,8 +47,10 @@ public sealed class DelaunayMesher : IMesher
         }
         var refiner = new Refiner(mesh, graph, settings);
         refiner.Run(cancellation);
-        return MeshNumbering.Run(mesh, points.Length, refiner);
+        return MeshNumbering.Run(mesh, points, refiner);
     }
+
+    private static double Sizeable(double coordinate) => Math.Abs(coordinate) < SmallestCoordinate ? 0 : coordinate;
 
     private static int TriangleCapacity(PlanarGraph graph, MeshSettings settings)
     {
@@ -61,11 +69,13 @@ public sealed class DelaunayMesher : IMesher
     {
         if (!(settings.MinAngle is >= 0 and <= 33))
         {
-            throw new ArgumentOutOfRangeException(nameof(settings), settings.MinAngle, "The smallest angle must be 0 to 33 degrees.");
+            throw new ArgumentOutOfRangeException(
+                nameof(settings), settings.MinAngle, "The smallest angle must be 0 to 33 degrees.");
         }
         if (!(settings.MaxArea > 0))
         {
-            throw new ArgumentOutOfRangeException(nameof(settings), settings.MaxArea, "The largest area must be positive.");
+            throw new ArgumentOutOfRangeException(
+                nameof(settings), settings.MaxArea, "The largest area must be positive.");
         }
     }
 
@@ -73,7 +83,9 @@ public sealed class DelaunayMesher : IMesher
     {
         for (int i = 0; i < graph.Points.Length; i++)
         {
-            if (!graph.Points[i].IsFinite) throw new ArgumentException($"Point {i} of the graph is not finite: {graph.Points[i]}.");
+            Point point = graph.Points[i];
+            if (Math.Abs(point.X) <= LargestCoordinate && Math.Abs(point.Y) <= LargestCoordinate) continue;
+            throw new ArgumentException($"Point {i} of the graph is not finite, or further than 1e60 mm away: {point}.");
         }
         for (int s = 0; s < graph.Segments.Length; s++)
         {
@@ -81,7 +93,8 @@ public sealed class DelaunayMesher : IMesher
             bool isInside = (uint)segment.From < (uint)graph.Points.Length && (uint)segment.To < (uint)graph.Points.Length;
             if (!isInside || segment.From == segment.To)
             {
-                throw new ArgumentException($"Segment {s} of the graph joins points {segment.From} and {segment.To}, of {graph.Points.Length}.");
+                throw new ArgumentException(
+                    $"Segment {s} of the graph joins points {segment.From} and {segment.To}, of {graph.Points.Length}.");
             }
         }
     }

@@ -11,7 +11,9 @@ internal static class MeshEdge
     /// <summary>The node where edge e ends.</summary>
     public static int To(Mesh mesh, int e) => mesh.Corners[e - e % 3 + (e + 2) % 3];
 
-    /// <summary>1 if edge e runs with the segment, -1 if against it, 0 if its triangle is not of the region on that side.</summary>
+    /// <summary>
+    /// 1 if edge e runs with the segment, -1 if against it, 0 if its triangle is not of the region on that side.
+    /// </summary>
     public static int Along(Mesh mesh, Segment segment, int e)
     {
         Point edge = mesh.Nodes[To(mesh, e)] - mesh.Nodes[From(mesh, e)];

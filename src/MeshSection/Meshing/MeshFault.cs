@@ -38,6 +38,8 @@ public enum MeshFaultKind
 
 /// <summary>One thing that is wrong with a mesh.</summary>
 /// <param name="Kind">What it is.</param>
-/// <param name="Index">The triangle; the point for a moved point, the segment for a broken one, the region for an area, -1 for the Euler count.</param>
+/// <param name="Index">
+/// The triangle; the point for a moved point, the segment for a broken one, the region for an area, -1 for the Euler count.
+/// </param>
 /// <param name="Place">Where it is, mm.</param>
 public readonly record struct MeshFault(MeshFaultKind Kind, int Index, Point Place);

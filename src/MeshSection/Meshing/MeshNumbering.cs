@@ -10,7 +10,7 @@ namespace MeshSection.Meshing;
 /// </summary>
 internal static class MeshNumbering
 {
-    public static Mesh Run(Triangulation mesh, int givenCount, Refiner refiner)
+    public static Mesh Run(Triangulation mesh, ImmutableArray<Point> given, Refiner refiner)
     {
         int[] order = HilbertOrder.Along(mesh.Xy, mesh.VertexCount);
         var rank = new int[order.Length];
@@ -19,11 +19,11 @@ internal static class MeshNumbering
 
         int[] number = rank;
         var nodes = new Point[order.Length];
-        int next = givenCount;
+        int next = given.Length;
         foreach (int v in order)
         {
-            number[v] = v < givenCount ? v : next++;
-            nodes[number[v]] = mesh.PointAt(v);
+            number[v] = v < given.Length ? v : next++;
+            nodes[number[v]] = v < given.Length ? given[v] : mesh.PointAt(v);
         }
         return Gather(mesh, number, nodes, triangles, refiner);
     }

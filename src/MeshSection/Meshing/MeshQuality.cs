@@ -11,7 +11,9 @@ namespace MeshSection.Meshing;
 /// <param name="SmallestAnglePlace">The corner where it is, mm.</param>
 /// <param name="LargestAngle">The largest angle of any triangle, degrees; NaN without triangles.</param>
 /// <param name="LargestArea">The largest area of any triangle, mm².</param>
-/// <param name="AngleHistogram">How many angles lie in each ten degrees from 0 to 180; length 18, three angles a triangle.</param>
+/// <param name="AngleHistogram">
+/// How many angles lie in each ten degrees from 0 to 180; length 18, three angles a triangle.
+/// </param>
 public sealed record MeshQuality(
     int Nodes,
     int Triangles,

@@ -6,11 +6,11 @@ namespace MeshSection.Meshing;
 /// <summary>
 /// Delaunay refinement [Ruppert1995, Shewchuk2002]: pieces of segments that a vertex encroaches upon are split; triangles
 /// with too small an angle or too large an area get a new vertex at their circumcentre, or nearer to their shortest edge
-/// where that does [Ungor2009]. A new vertex that would encroach upon a segment, or cannot see past it, splits it instead.
+/// where that does [Ungor2009]. A new vertex that would encroach upon a segment, or lies beyond it, splits it instead.
 /// </summary>
 internal sealed class Refiner
 {
-    /// <summary>What an angle may fall short of the bound, degrees, so that an input angle equal to it is not refined.</summary>
+    /// <summary>By how much an angle may miss the bound, degrees: an input angle equal to it is not refined.</summary>
     private const double AngleSlack = 1e-6;
 
     /// <summary>The shortest edge that may be split, in units of the largest coordinate.</summary>
@@ -142,7 +142,9 @@ internal sealed class Refiner
         return (isInputAngle && isOnlyOne) || smallCorners.Spans(mesh.From(shortest), mesh.To(shortest));
     }
 
-    /// <summary>Whether the corner opposite the segment's edge e lies in its lens, where its triangle has a small angle.</summary>
+    /// <summary>
+    /// Whether the corner opposite the segment's edge e lies in its lens, so that their triangle has a small angle.
+    /// </summary>
     private bool IsEncroached(int e)
     {
         Point apex = mesh.PointAt(mesh.Corners[e]);

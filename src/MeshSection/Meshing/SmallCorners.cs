@@ -51,7 +51,9 @@ internal sealed class SmallCorners
         return Math.Abs(uu - vv) <= 2 * SameCircle * uu && toU.Dot(toV) > 0.499 * uu;
     }
 
-    /// <summary>The radius, a power of two, at which a piece of the given length is split: a third to two thirds of it.</summary>
+    /// <summary>
+    /// The radius, a power of two, at which a piece of the given length is split: a third to two thirds of it.
+    /// </summary>
     public static double Radius(double length) => Math.ScaleB(1, Math.ILogB(2 * length / 3));
 
     private void Find(int pointCount)

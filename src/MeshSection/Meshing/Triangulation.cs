@@ -181,7 +181,10 @@ internal sealed class Triangulation
         pending[pendingCount++] = e;
     }
 
-    /// <summary>Flips the pending edges, each opposite a new vertex, and those that come into their place, until all are locally Delaunay.</summary>
+    /// <summary>
+    /// Flips the pending edges, each opposite a new vertex, and those that come into their place, until all are locally
+    /// Delaunay.
+    /// </summary>
     private void Legalise()
     {
         while (pendingCount > 0)

@@ -31,6 +31,7 @@ internal static class HostileGraphs
             .Loop(Rectangle(0, 0, 100, 100), 0, -1)
             .Line(new(20, 20), new(80, 20.001), 0, 0).Line(new(80, 20.001), new(60, 70), 0, 0)
             .Dot(new(50, 50)).Dot(new(50, 50.001)).Dot(new(99.999, 50)).Build(),
+        ["lines through a cloud of points"] = Cloud(),
         ["points outside"] = new Graphs().Loop(Rectangle(0, 0, 10, 10), 0, -1).Dot(new(500, 3)).Dot(new(-1, 5)).Build(),
         ["collinear points along each side"] = Graphs.Of(Comb(0, 1)),
         ["cocircular grid"] = Grid(12),
@@ -50,6 +51,8 @@ internal static class HostileGraphs
         ["bar tangent to a face"] = Graphs.Of(Rectangle(0, 0, 100, 50), Hole(Circle(50, 10 + 1e-7, 10, 64))),
         ["two segments at 2 and 5 degrees in a corner"] = Corner(2, 5),
         ["plate 1000 to 1"] = Graphs.Of(Rectangle(0, 0, 1000, 1)),
+        ["coordinates whose products underflow"] = Graphs.Of(
+            Polygon(1e-98, -3e-120, 100, 1e-200, 100, 100, -1e-310, 100), Hole(Circle(50, 1e-5, 1e-6, 8))),
         ["needle"] = Graphs.Of(Polygon(0, 0, 1e6, 0.5, 1e6, 1)),
         ["star of thin spikes"] = Star(36, 1, 100),
     };
@@ -86,6 +89,15 @@ internal static class HostileGraphs
                 if (j < n) graph.Line(new(i, j), new(i, j + 1), Region(i - 1, j), Region(i, j));
             }
         }
+        return graph.Build();
+    }
+
+    private static PlanarGraph Cloud()
+    {
+        var random = new Random(7);
+        var graph = new Graphs().Loop(Rectangle(-1, -1, 102, 102), 0, -1);
+        for (int i = 0; i < 500; i++) graph.Dot(new(100 * random.NextDouble(), 100 * random.NextDouble()));
+        for (int i = 0; i < 20; i++) graph.Line(new(-0.5, 5 * i), new(100.5, 5 * i + 0.1), 0, 0);
         return graph.Build();
     }
 

@@ -81,6 +81,7 @@ public class NonPlanarGraphTests
         PlanarGraph graph = Graphs.Of(Rectangle(0, 0, 10, 10));
         Assert.Throws<ArgumentException>(() => Mesh(graph with { Points = graph.Points.Add(new(10, 10)) }));
         Assert.Throws<ArgumentException>(() => Mesh(graph with { Points = graph.Points.Add(new(double.NaN, 10)) }));
+        Assert.Throws<ArgumentException>(() => Mesh(graph with { Points = graph.Points.Add(new(5, 1e100)) }));
         Assert.Throws<ArgumentException>(() => Mesh(graph with { Segments = graph.Segments.Add(new(0, 4, 0, 0)) }));
         Assert.Throws<ArgumentException>(() => Mesh(graph with { Segments = graph.Segments.Add(new(-1, 2, 0, 0)) }));
         Assert.Throws<ArgumentException>(() => Mesh(graph with { Segments = graph.Segments.Add(new(2, 2, 0, 0)) }));

@@ -139,5 +139,9 @@ internal sealed class EntityFields(TagReader tags, TagText text)
 
     private int Integer() => tags.TryInteger(out var number) ? number : throw BadNumber();
 
-    private DrawingException BadNumber() => ReadingFaults.Number(tags.Line, tags.Code, Source, tags.Value);
+    private DrawingException BadNumber()
+    {
+        var source = Source;
+        return ReadingFaults.Number(tags, source.ToString(), source);
+    }
 }

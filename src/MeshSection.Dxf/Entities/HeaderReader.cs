@@ -53,7 +53,7 @@ internal sealed class HeaderReader(TagReader tags)
     {
         if (!tags.TryInteger(out var code))
         {
-            throw ReadingFaults.HeaderNumber(tags.Line, tags.Code, "$INSUNITS", tags.Value);
+            throw ReadingFaults.Number(tags, "$INSUNITS");
         }
 
         Unit = LengthUnit.FromDrawingCode(code);

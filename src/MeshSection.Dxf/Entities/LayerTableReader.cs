@@ -56,5 +56,5 @@ internal sealed class LayerTableReader(TagReader tags, TagText text)
 
     private int Integer(string layer) => tags.TryInteger(out var number)
         ? number
-        : throw ReadingFaults.LayerNumber(tags.Line, tags.Code, layer, tags.Value);
+        : throw ReadingFaults.Number(tags, $"the layer '{layer}'");
 }

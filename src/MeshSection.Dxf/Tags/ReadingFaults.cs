@@ -62,23 +62,24 @@ internal static class ReadingFaults
         "Export or copy the drawing again.")
     { Line = line, Places = [new EntityPlace(source, null)] };
 
-    public static DrawingException Number(int line, int code, EntitySource source, ReadOnlySpan<byte> value) => new(
-        DrawingFault.BadNumber,
-        $"Line {line}: group {code} of {source} should be a finite number, not {Quoted(value)}." +
-        (value.Contains((byte)',') ? " Numbers in a DXF have a decimal point, never a comma." : "") +
-        " Export the drawing again.")
-    { Line = line, GroupCode = code, Places = [new EntityPlace(source, null)] };
+    /// <param name="tags">The tag whose value is no number.</param>
+    /// <param name="owner">What the value belongs to.</param>
+    /// <param name="source">The entity that it belongs to, if it is one.</param>
+    public static DrawingException Number(TagReader tags, string owner, EntitySource? source = null)
+    {
+        if (tags.UnterminatedValue is { } cut)
+        {
+            return CutValue(tags.Line, $"'{cut}'");
+        }
 
-    public static DrawingException HeaderNumber(int line, int code, string variable, ReadOnlySpan<byte> value) => new(
-        DrawingFault.BadNumber,
-        $"Line {line}: {variable} should be a whole number, not {Quoted(value)}. Export the drawing again.")
-    { Line = line, GroupCode = code };
-
-    public static DrawingException LayerNumber(int line, int code, string layer, ReadOnlySpan<byte> value) => new(
-        DrawingFault.BadNumber,
-        $"Line {line}: group {code} of the layer '{layer}' should be a whole number, not {Quoted(value)}. " +
-        "Export the drawing again.")
-    { Line = line, GroupCode = code };
+        return new DrawingException(
+            DrawingFault.BadNumber,
+            $"Line {tags.Line}: group {tags.Code} of {owner} should be a finite number, whole where it counts something, " +
+            $"not {Quoted(tags.Value)}." +
+            (tags.Value.Contains((byte)',') ? " Numbers in a DXF have a decimal point, never a comma." : "") +
+            " Export the drawing again.")
+        { Line = tags.Line, GroupCode = tags.Code, Places = source is null ? [] : [new EntityPlace(source, null)] };
+    }
 
     public static DrawingException Missing(EntitySource source, int code, string what) => new(
         DrawingFault.BadEntity,

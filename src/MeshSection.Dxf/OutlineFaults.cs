@@ -123,6 +123,7 @@ internal static class OutlineFaults
         {
             OutlineFault.Empty => (DrawingFault.NoBoundary, "There is no closed boundary", "Close the outline."),
             OutlineFault.NotFinite => (DrawingFault.ExtentsUnusable, "A coordinate is out of range", "Draw it again."),
+            OutlineFault.NoLength => (DrawingFault.ToleranceUnusable, "Joining drew both ends of an edge together", "Give a smaller --tolerance."),
             OutlineFault.NoArea => (DrawingFault.NoArea, "A boundary encloses no area", "Delete it, or draw it with its true width."),
             OutlineFault.SelfCrossing => (DrawingFault.SelfCrossing, "A boundary crosses itself", "Trim the edges where they cross."),
             OutlineFault.SelfTouching => (DrawingFault.SelfTouching, "A boundary touches itself", "Move the edges apart, or draw two boundaries."),

@@ -63,6 +63,12 @@ internal static class OutlineFaults
         { Tolerance = gap, Distance = shortest, Places = [new EntityPlace(piece.Entity.Source, at)] };
     }
 
+    public static DrawingException Crowded(Point place, LocalFrame frame, JoinGap gap) => new(
+        DrawingFault.ToleranceUnusable,
+        $"More than a thousand ends lie about {Wording.At(frame.ToDrawing(place))}, within a few times the tolerance " +
+        $"{Wording.Distance(gap.Length / frame.Scale)}. Give a smaller --tolerance, or leave out what is no part of the outline with --layer.")
+    { Tolerance = gap.Length / frame.Scale };
+
     public static DrawingException Branch(
         List<Piece> met, Point place, bool isBridged, int branches, LocalFrame frame, JoinGap gap)
     {

@@ -1,4 +1,3 @@
-using System.Runtime.InteropServices;
 using MeshSection.Dxf.Curves;
 using MeshSection.Dxf.Entities;
 using MeshSection.Geometry;
@@ -20,46 +19,42 @@ internal static class Duplicates
         double tolerance,
         Dictionary<(Entity Dropped, Entity Kept), int> found)
     {
-        var firstBetween = new Dictionary<(int, int), int>(pieces.Count);
-        var next = new int[pieces.Count];
+        var candidates = new List<Candidate>(pieces.Count);
         for (var i = 0; i < pieces.Count; i++)
         {
-            next[i] = -1;
-            if (dropped[i])
+            if (!dropped[i])
             {
-                continue;
+                var (a, b) = (nodes.Start(i), nodes.End(i));
+                var isForward = nodes.IsBefore(a, b);
+                candidates.Add(new Candidate(isForward ? a : b, isForward ? b : a, Rise(pieces[i], isForward), i));
             }
+        }
 
-            var (a, b) = (nodes.Start(i), nodes.End(i));
-            ref var first = ref CollectionsMarshal.GetValueRefOrAddDefault(
-                firstBetween, a < b ? (a, b) : (b, a), out var exists);
-            if (!exists)
+        candidates.Sort();
+        for (var k = 1; k < candidates.Count; k++)
+        {
+            var (kept, next) = (candidates[k - 1], candidates[k]);
+            if (next.From == kept.From && next.To == kept.To && next.Rise - kept.Rise <= tolerance)
             {
-                first = i;
-                continue;
+                dropped[next.Piece] = true;
+                var pair = (pieces[next.Piece].Entity, pieces[kept.Piece].Entity);
+                found[pair] = found.GetValueOrDefault(pair) + 1;
+                candidates[k] = kept;
             }
-
-            var twin = first;
-            while (twin >= 0 && Math.Abs(Rise(pieces[twin], nodes.Start(twin) < nodes.End(twin)) - Rise(pieces[i], a < b)) > tolerance)
-            {
-                twin = next[twin];
-            }
-
-            if (twin < 0)
-            {
-                next[i] = first;
-                first = i;
-                continue;
-            }
-
-            dropped[i] = true;
-            var pair = (pieces[i].Entity, pieces[twin].Entity);
-            found[pair] = found.GetValueOrDefault(pair) + 1;
         }
     }
 
-    /// <summary>How far the piece rises over its chord, to the right of the way from the lower to the higher node.</summary>
+    /// <summary>How far the piece rises over its chord, to the right of the way from the first of its nodes to the other.</summary>
     private static double Rise(Piece piece, bool isForward) => piece.Edge is ArcEdge arc
         ? 0.5 * arc.Chord.Length * (isForward ? arc.Bulge : -arc.Bulge)
         : 0;
+
+    private readonly record struct Candidate(int From, int To, double Rise, int Piece) : IComparable<Candidate>
+    {
+        public int CompareTo(Candidate other) =>
+            From != other.From ? From.CompareTo(other.From)
+            : To != other.To ? To.CompareTo(other.To)
+            : Rise != other.Rise ? Rise.CompareTo(other.Rise)
+            : Piece.CompareTo(other.Piece);
+    }
 }

@@ -58,8 +58,19 @@ internal sealed class EndNodes
         return point;
     }
 
-    /// <summary>Makes two nodes one.</summary>
-    public void Merge(int a, int b) => _parents[Find(a)] = Find(b);
+    /// <summary>Makes two nodes one, named by the least of its points, so that the order of merging does not show.</summary>
+    public void Merge(int a, int b)
+    {
+        var (first, second) = (Find(a), Find(b));
+        if (first != second)
+        {
+            var isInOrder = IsBefore(first, second);
+            _parents[isInOrder ? second : first] = isInOrder ? first : second;
+        }
+    }
+
+    /// <summary>True if the point of one node lies left of (or, if neither does, below) that of another.</summary>
+    public bool IsBefore(int a, int b) => (_points[a].X, _points[a].Y).CompareTo((_points[b].X, _points[b].Y)) < 0;
 
     /// <summary>The drawn points of each node that holds more than one.</summary>
     public Dictionary<int, List<int>> Merged()

@@ -103,9 +103,15 @@ internal sealed class LoopFinder
         }
 
         var near = new NearEnds(_nodes.Points, _gap.Length);
+        var found = new List<int>();
         foreach (var point in free)
         {
-            foreach (var other in near.Of(point))
+            if (!near.TryFind(point, found))
+            {
+                throw OutlineFaults.Crowded(_nodes.Points[point], _frame, _gap);
+            }
+
+            foreach (var other in found)
             {
                 _nodes.Merge(point, other);
             }

@@ -5,6 +5,9 @@ namespace MeshSection.Dxf.Loops;
 /// <summary>Finds the points within a distance of one another by a grid of cells of that size.</summary>
 internal sealed class NearEnds
 {
+    // No drawing has so many ends in nine cells; looking at all of them for each would take forever.
+    private const int Crowd = 1000;
+
     private readonly Dictionary<(long X, long Y), int> _cells;
     private readonly int[] _nextInCell;
     private readonly IReadOnlyList<Point> _points;
@@ -24,9 +27,14 @@ internal sealed class NearEnds
         }
     }
 
-    /// <summary>The numbers of the other points within the distance of a point.</summary>
-    public IEnumerable<int> Of(int number)
+    /// <summary>Finds the other points within the distance of a point.</summary>
+    /// <param name="number">The number of the point.</param>
+    /// <param name="found">Their numbers; what it held before is removed.</param>
+    /// <returns>False if so many lie about the point that they were not all looked at.</returns>
+    public bool TryFind(int number, List<int> found)
     {
+        found.Clear();
+        var seen = 0;
         var point = _points[number];
         var (column, row) = Cell(point);
         for (var x = column - 1; x <= column + 1; x++)
@@ -36,13 +44,20 @@ internal sealed class NearEnds
                 var other = _cells.TryGetValue((x, y), out var head) ? head : -1;
                 for (; other >= 0; other = _nextInCell[other])
                 {
+                    if (++seen > Crowd)
+                    {
+                        return false;
+                    }
+
                     if (other != number && _points[other].DistanceTo(point) <= _distance)
                     {
-                        yield return other;
+                        found.Add(other);
                     }
                 }
             }
         }
+
+        return true;
     }
 
     private (long X, long Y) Cell(Point p) => ((long)Math.Floor(p.X / _distance), (long)Math.Floor(p.Y / _distance));

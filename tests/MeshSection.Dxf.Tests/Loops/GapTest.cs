@@ -147,6 +147,15 @@ public class GapTest
     public void Only_entities_without_length_make_no_boundary() =>
         Assert.Equal(DrawingFault.NoBoundary, Refusal(Drawing([Line(3, 3, 3, 3)])).Fault);
 
+    [Fact]
+    public void Thousands_of_ends_within_the_tolerance_are_refused_with_their_place()
+    {
+        var rays = Enumerable.Range(0, 2000).Select(i => Line(4 + 1e-6 * i, 3, 100 * Math.Cos(i), 100 * Math.Sin(i)));
+        var refusal = Refusal(Drawing(rays), Within(0.01));
+        Assert.Equal((DrawingFault.ToleranceUnusable, 0.01), (refusal.Fault, refusal.Tolerance));
+        Assert.Contains("about (4", refusal.Message, StringComparison.Ordinal);
+    }
+
     internal static string[] LooseSquare(double x, double y, double side) =>
     [
         Line(x, y, x + side, y), Line(x + side, y, x + side, y + side), Line(x + side, y + side, x, y + side), Line(x, y + side, x, y),

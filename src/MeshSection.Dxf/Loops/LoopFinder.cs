@@ -206,7 +206,7 @@ internal sealed class LoopFinder
                 from = to;
             }
 
-            loops.Add(new Loop(edges, entities).Canonical());
+            loops.Add(new Loop(edges, entities).FromLeftmostCorner());
             NoteClosing(entities);
         }
 

@@ -68,6 +68,7 @@ public class LocalFrameTest
         return Drawing(
         [
             Line(X(0), Y(0), X(90), Y(0)), Arc(X(90), Y(30), 30 * scale, 270, 90), Line(X(90), Y(60), X(0), Y(60.5)), Line(X(0), Y(60.5), X(0), Y(0)),
+            Circle(X(200), Y(30), 7.7 * scale), // what is drawn ends at no round number
             Circle(X(40.25), Y(30), 12.5 * scale),
             LwPolyline([(X(70), Y(20), 0.25), (X(80), Y(20), 0), (X(80), Y(40), -0.5), (X(70), Y(40), 0)]),
         ], unit);

@@ -89,6 +89,15 @@ public class GapTest
     }
 
     [Fact]
+    public void Where_a_line_meets_an_arc_the_end_that_the_drawing_states_holds()
+    {
+        // cos 37° and sin 37° to six digits.
+        var stated = new Point(7 * 0.798636, 7 * 0.601815);
+        var result = Outline(Drawing([Arc(0, 0, 7, 37, 180), Line(stated.X, stated.Y, 0, -3), Line(0, -3, -7, 0)]));
+        Assert.Equal(stated, Assert.Single(result.Report.Repairs).Point);
+    }
+
+    [Fact]
     public void A_gap_that_can_be_closed_in_two_ways_is_refused()
     {
         string[] pieces = [Line(0, 0, 10, 0, "1"), Line(10, 0.004, 10, 10, "2"), Line(10, 10, 0, 0, "3"), Line(10.004, 0, 20, 0, "4")];

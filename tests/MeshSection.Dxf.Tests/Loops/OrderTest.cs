@@ -35,6 +35,21 @@ public class OrderTest
     }
 
     [Fact]
+    public void Copies_that_do_not_quite_lie_on_one_another_give_the_same_bits_whatever_the_order()
+    {
+        var sloppy = Enumerable.Range(0, 12).Select(i =>
+        {
+            var (a, b) = (Math.Tau * (i % 4) / 4, Math.Tau * (i % 4 + 1) / 4);
+            double Off(int k) => 1e-6 * ((i * 7 + k * 3) % 11);
+            return new Piece(false, 10 * Math.Cos(a) + Off(0), 10 * Math.Sin(a) + Off(1), 10 * Math.Cos(b) + Off(2), 10 * Math.Sin(b) + Off(3), 0);
+        }).ToArray();
+        var expected = Edges(sloppy.Select(p => p.Text(false)));
+        Assert.Equal(4, expected.Count);
+        Gen.Select(Gen.Shuffle((Piece[])sloppy.Clone()), Gen.Bool.Array[12]).Sample((order, reversed) =>
+            Assert.Equal(expected, Edges(order.Select((p, i) => p.Text(reversed[i])))), iter: 200);
+    }
+
+    [Fact]
     public void A_doubled_piece_is_named_with_the_one_that_stays()
     {
         var report = Outline(Drawing([Square(0, 0, 10, "S"), Line(10, 0, 0, 0, "D"), Circle(5, 5, 1, "C"), Circle(5, 5, 1, "E")])).Report;

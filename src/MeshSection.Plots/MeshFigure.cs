@@ -32,14 +32,14 @@ public static class MeshFigure
         new Panel(Rows(mesh, quality, unit)).Add(sheet, area => View.ScaleFor(outline.Bounds, Inner(area)));
         var view = View.Fit(outline.Bounds, Inner(sheet.Free));
         var lengths = new LengthScale(unit, Math.Max(outline.Bounds.Width, outline.Bounds.Height));
-        ScaleBar.Add(sheet, view.Scale, unit, $"{lengths.Format(outline.Bounds.Width)} × {lengths.Format(outline.Bounds.Height)}, {lengths.Note}");
+        ScaleBar.Add(sheet, view.Scale, unit, lengths.NoteOn(outline.Bounds));
 
         OutlineMarks.AddRegions(sheet, outline, view);
         AddUnrefined(sheet, mesh, view);
         sheet.Add(new Area([MeshMarks.Triangle(mesh, view, quality.Sharpest)], Palette.Orange, Stroke.None));
         sheet.Add(MeshMarks.InnerEdges(mesh, view));
         sheet.Add(MeshMarks.OutlineEdges(mesh, view));
-        AddSharpest(sheet, mesh, view, quality);
+        AddSharpest(sheet, outline.Bounds, mesh, view, quality);
         return sheet.ToFigure();
     }
 
@@ -84,7 +84,7 @@ public static class MeshFigure
         }
     }
 
-    private static void AddSharpest(Sheet sheet, Mesh mesh, View view, MeshQuality quality)
+    private static void AddSharpest(Sheet sheet, Box bounds, Mesh mesh, View view, MeshQuality quality)
     {
         var triangle = MeshMarks.Triangle(mesh, view, quality.Sharpest);
         var middle = MeshMarks.Middle(triangle);
@@ -94,8 +94,10 @@ public static class MeshFigure
         // The angle stands beside the section, level with its triangle.
         var text = KeyValues.Angle(quality.LeastAngle);
         var lettering = Lettering.Strong with { Colour = Palette.Orange };
-        var right = 0.5 * (sheet.Free.MinX + sheet.Free.MaxX) < middle.X;
-        var x = right ? sheet.Free.MaxX - 0.5 * lettering.Width(text) : sheet.Free.MinX + 0.5 * lettering.Width(text);
+        var right = middle.X > view.Target.X;
+        var box = view.Of(bounds);
+        var away = 40 + 0.5 * lettering.Width(text);
+        var x = right ? box.MaxX + away : box.MinX - away;
         if (sheet.Find(new Label(text, new ScreenPoint(x, middle.Y), lettering)) is { } label)
         {
             var start = right ? middle.X + radius : middle.X - radius;

@@ -12,14 +12,15 @@ namespace MeshSection.Plots;
 public static class OutlineFigure
 {
     private const int MostListed = 12;
-    private static readonly Stroke ArcBand = new(OxyColor.FromRgb(0xA9, 0xC8, 0xE0), 13);
     private static readonly Stroke Pointed = new(Palette.Orange, 3);
 
     /// <summary>Lays the picture out.</summary>
     /// <param name="outline">The outline; boundary i carries the number i + 1.</param>
     /// <param name="title">The heading; may be empty.</param>
     /// <param name="unit">The unit for every number on the picture.</param>
-    /// <param name="marks">Places to point out; may be empty.</param>
+    /// <param name="marks">
+    /// Places to point out; may be empty. Those farther from the outline than half its size are left out, lest it shrink.
+    /// </param>
     /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
     /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
     public static Figure Of(
@@ -29,32 +30,36 @@ public static class OutlineFigure
         ArgumentNullException.ThrowIfNull(title);
         ArgumentNullException.ThrowIfNull(unit);
         ArgumentNullException.ThrowIfNull(marks);
+        var reach = outline.Bounds.Grown(0.5 * outline.Bounds.Diagonal);
+        OutlineMark[] near = [.. marks.Where(m => reach.Contains(m.Place - outline.Origin))];
+        var bounds = near.Aggregate(outline.Bounds, (box, m) => box.With(m.Place - outline.Origin));
+
         var sheet = new Sheet(size ?? PictureSize.Standard);
         Heading.Add(sheet, title);
-        new Panel(Rows(outline, marks)).Add(sheet, area => View.ScaleFor(outline.Bounds, Inner(area)));
-        var view = View.Fit(outline.Bounds, Inner(sheet.Free));
+        new Panel(Rows(outline, near)).Add(sheet, area => View.ScaleFor(bounds, Inner(area)));
+        var view = View.Fit(bounds, Inner(sheet.Free));
         var lengths = new LengthScale(unit, Math.Max(outline.Bounds.Width, outline.Bounds.Height));
-        ScaleBar.Add(
-            sheet, view.Scale, unit, $"{lengths.Format(outline.Bounds.Width)} × {lengths.Format(outline.Bounds.Height)}, {lengths.Note}");
+        ScaleBar.Add(sheet, view.Scale, unit, lengths.NoteOn(outline.Bounds));
 
         OutlineMarks.AddRegions(sheet, outline, view);
         foreach (var boundary in outline.Boundaries)
         {
-            AddEdges(sheet, boundary, view);
+            BoundaryMarks.AddEdges(sheet, boundary, view);
         }
 
-        AddMarks(sheet, outline, marks, view);
-        for (var i = 0; i < outline.Boundaries.Length; i++)
+        AddMarks(sheet, outline, near, view);
+        foreach (var boundary in outline.Boundaries)
         {
-            AddStart(sheet, outline.Boundaries[i], i + 1, view);
+            BoundaryMarks.AddStart(sheet, boundary, view);
         }
 
+        BoundaryNumbers.Add(sheet, outline, view);
         return sheet.ToFigure();
     }
 
     private static Box Inner(Box area) => ScaleBar.Above(area).Grown(-50);
 
-    private static ImmutableArray<PanelRow> Rows(Outline outline, IReadOnlyList<OutlineMark> marks)
+    private static ImmutableArray<PanelRow> Rows(Outline outline, OutlineMark[] marks)
     {
         var rows = ImmutableArray.CreateBuilder<PanelRow>();
         var count = outline.Boundaries.Length;
@@ -73,17 +78,17 @@ public static class OutlineFigure
 
         foreach (var role in outline.Boundaries.Select(b => b.Role).Distinct().Order())
         {
-            rows.Add(LegendRow.OfLine(StrokeOf(role), Words(role)));
+            rows.Add(LegendRow.OfLine(BoundaryMarks.StrokeOf(role), Words(role)));
         }
 
         if (outline.Boundaries.Any(b => b.Boundary.Edges.Any(e => e is not LineEdge)))
         {
-            rows.Add(LegendRow.OfLine(ArcBand, "arc"));
+            rows.Add(LegendRow.OfLine(BoundaryMarks.ArcBand, "arc"));
         }
 
-        rows.Add(new LegendRow(p => [Joint(p)], "joint of two edges"));
-        rows.Add(new LegendRow(p => [Arrow(p, new Point(1, 0), Palette.Ink)], "start, material on the left"));
-        if (marks.Count > 0)
+        rows.Add(new LegendRow(p => [BoundaryMarks.Joint(p, 1)], "joint of two edges"));
+        rows.Add(new LegendRow(p => [BoundaryMarks.Arrow(p, new Point(1, 0), Palette.Ink, 1)], "start, material on the left"));
+        if (marks.Length > 0)
         {
             rows.Add(new LegendRow(p => [new Disc(p, 13, OxyColors.Undefined, Pointed)], "repaired or left out"));
         }
@@ -91,47 +96,7 @@ public static class OutlineFigure
         return rows.ToImmutable();
     }
 
-    private static void AddEdges(Sheet sheet, NestedBoundary nested, View view)
-    {
-        var (boundary, role, _, _) = nested;
-        foreach (var arc in boundary.Edges.Where(e => e is not LineEdge))
-        {
-            sheet.Add(new Polyline(view.Of(arc), ArcBand));
-        }
-
-        sheet.Add(new Area([view.Of(boundary)], OxyColors.Undefined, StrokeOf(role)));
-        foreach (var edge in boundary.Edges)
-        {
-            sheet.Add(Joint(view.Of(edge.Start)));
-        }
-    }
-
-    private static void AddStart(Sheet sheet, NestedBoundary nested, int number, View view)
-    {
-        var first = nested.Boundary.Edges[0];
-        var start = view.Of(first.Start);
-        var along = first.TangentAt(0);
-        var colour = StrokeOf(nested.Role).Colour;
-        sheet.Add(Arrow(start, along, colour));
-
-        // The number stands off the material, on the right of the way, or else on the left.
-        var lettering = Lettering.Strong with { Colour = colour };
-        var text = Numbers.Count(number);
-        if (sheet.Find(At(-34), At(34), At(-70), At(70)) is { } label)
-        {
-            var radius = 0.5 * Math.Max(label.Box.Width, label.Box.Height) + 3;
-            sheet.Add(new Disc(label.Centre, radius, Palette.Paper, new Stroke(colour, 2.4)));
-            sheet.Add(label);
-        }
-
-        Label At(double distance)
-        {
-            var away = distance * along.Left() + 8 * along;
-            return new(text, new ScreenPoint(start.X + away.X, start.Y - away.Y), lettering);
-        }
-    }
-
-    private static void AddMarks(Sheet sheet, Outline outline, IReadOnlyList<OutlineMark> marks, View view)
+    private static void AddMarks(Sheet sheet, Outline outline, OutlineMark[] marks, View view)
     {
         foreach (var mark in marks)
         {
@@ -150,14 +115,6 @@ public static class OutlineFigure
         }
     }
 
-    private static Stroke StrokeOf(BoundaryRole role) => role switch
-    {
-        BoundaryRole.Outer => new Stroke(Palette.Ink, 3.4),
-        BoundaryRole.Hole => new Stroke(Palette.Orange, 3.4, 16, 6),
-        BoundaryRole.Island => new Stroke(Palette.Green, 3.4, 22, 6, 4, 6),
-        _ => throw new ArgumentOutOfRangeException(nameof(role), role, null),
-    };
-
     private static string Words(BoundaryRole role) => role switch
     {
         BoundaryRole.Outer => "outer boundary",
@@ -167,18 +124,4 @@ public static class OutlineFigure
     };
 
     private static string Counted(int count, string noun) => $"{Numbers.Count(count)} {noun}{(count == 1 ? "" : "s")}";
-
-    private static Disc Joint(ScreenPoint p) => new(p, 4.5, Palette.Paper, new Stroke(Palette.Ink, 1.8));
-
-    private static Area Arrow(ScreenPoint tail, Point along, OxyColor colour)
-    {
-        var left = along.Left();
-        ScreenPoint At(double ahead, double aside)
-        {
-            var p = ahead * along + aside * left;
-            return new ScreenPoint(tail.X + p.X, tail.Y - p.Y);
-        }
-
-        return new Area([[At(-4, 11), At(22, 0), At(-4, -11)]], colour, new Stroke(Palette.Paper, 1.5));
-    }
 }

@@ -6,6 +6,9 @@ namespace MeshSection.Plots;
 /// <summary>Writes figures as PNG.</summary>
 public static class PngWriter
 {
+    // A unit of the sheet is a tenth of a millimetre in print.
+    private const double UnitsPerMetre = 10_000;
+
     /// <summary>Writes a figure to a file, in place of what may be there.</summary>
     /// <param name="figure">What to draw.</param>
     /// <param name="path">The file to make; its folder must exist.</param>
@@ -18,7 +21,10 @@ public static class PngWriter
         File.WriteAllBytes(path, bytes);
     }
 
-    /// <summary>Draws a figure as PNG. The same figure gives the same bytes.</summary>
+    /// <summary>
+    /// Draws a figure as PNG that states its size in print: 160 mm wide in the standard proportions. The same figure gives
+    /// the same bytes.
+    /// </summary>
     /// <param name="figure">What to draw.</param>
     public static byte[] Encode(Figure figure)
     {
@@ -34,6 +40,6 @@ public static class PngWriter
 
         using var pixels = bitmap.PeekPixels();
         using var data = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Up, 6));
-        return data.ToArray();
+        return PngResolution.State(data.AsSpan(), (uint)Math.Round(figure.UnitScale * UnitsPerMetre));
     }
 }

@@ -11,6 +11,9 @@ internal static class Numbers
 
     private const int Digits = 5;
 
+    // The least mantissa that five digits round up to 1.
+    private const double RoundsUp = 0.999995;
+
     /// <summary>
     /// A value with five significant digits and no trailing zeros: 0.01234, 1 234.5, 123 456, 12.346×10⁶. Whole digits
     /// are never rounded away.
@@ -29,7 +32,7 @@ internal static class Numbers
 
     /// <summary>The power of ten, a multiple of three, that is taken out of a value; 0 for those of plain size.</summary>
     public static int SharedExponent(double size) =>
-        size is >= 1e-3 and < 999_999.5 ? 0 : 3 * (int)Math.Floor((Math.Log10(size) + 1e-9) / 3);
+        size is >= 1e-3 and < 999_999.5 ? 0 : 3 * (int)Math.Floor(Math.Log10(size / RoundsUp) / 3);
 
     /// <summary>How many decimals give a value its five digits.</summary>
     public static int DecimalsFor(double size) => Math.Clamp(Digits - 1 - (int)Math.Floor(Math.Log10(size)), 0, 15);

@@ -1,3 +1,4 @@
+using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 
 namespace MeshSection.Plots.Layout;
@@ -26,6 +27,9 @@ internal sealed class LengthScale
     public string Note => exponent == 0
         ? $"dimensions in {unit.Symbol}"
         : $"dimensions in 10{Numbers.Superscript(exponent)} {unit.Symbol}";
+
+    /// <summary>The same after an overall width and height: "200 × 120, dimensions in mm".</summary>
+    public string NoteOn(Box bounds) => $"{Format(bounds.Width)} × {Format(bounds.Height)}, {Note}";
 
     public string Format(double millimetres) =>
         Numbers.Fixed(unit.Convert(millimetres, 1) / Math.Pow(10, exponent), decimals);

@@ -77,12 +77,9 @@ internal sealed class Sheet
     /// </summary>
     public Label? Find(params ReadOnlySpan<Label> candidates)
     {
-        foreach (var candidate in candidates)
+        if (FirstFree(0, candidates) is { } free)
         {
-            if (IsFree(candidate.Box))
-            {
-                return candidate;
-            }
+            return free;
         }
 
         var first = candidates[0];
@@ -97,6 +94,20 @@ internal sealed class Sheet
                 {
                     return moved;
                 }
+            }
+        }
+
+        return null;
+    }
+
+    /// <summary>The first of the candidates that stands free with so much room all around; null if none does.</summary>
+    public Label? FirstFree(double room, params ReadOnlySpan<Label> candidates)
+    {
+        foreach (var candidate in candidates)
+        {
+            if (IsFree(candidate.Box.Grown(room)))
+            {
+                return candidate;
             }
         }
 

@@ -36,7 +36,7 @@ public static class MeshFigure
 
         OutlineMarks.AddRegions(sheet, outline, view);
         AddUnrefined(sheet, mesh, view);
-        sheet.Add(new Area([MeshMarks.Triangle(mesh, view, quality.Sharpest)], Palette.Orange, Stroke.None));
+        sheet.Add(new Area([MeshMarks.Triangle(mesh, view, quality.SmallestAngleTriangle)], Palette.Orange, Stroke.None));
         sheet.Add(MeshMarks.InnerEdges(mesh, view));
         sheet.Add(MeshMarks.OutlineEdges(mesh, view));
         AddSharpest(sheet, outline.Bounds, mesh, view, quality);
@@ -52,14 +52,12 @@ public static class MeshFigure
 
     private static ImmutableArray<PanelRow> Rows(Mesh mesh, MeshQuality quality, DisplayUnit unit)
     {
-        string Size(double area) => $"{Numbers.Format(unit.Convert(area, 2))} {unit.PowerOf(2)}";
         var rows = ImmutableArray.CreateBuilder<PanelRow>();
-        rows.Add(new ValueRow("Triangles", "", "", Numbers.Count(mesh.TriangleCount)));
-        rows.Add(new ValueRow("Nodes", "", "", Numbers.Count(mesh.Nodes.Length)));
-        rows.Add(new ValueRow("Smallest angle", "", "", KeyValues.Angle(quality.LeastAngle)));
-        rows.Add(new ValueRow("Largest angle", "", "", KeyValues.Angle(quality.GreatestAngle)));
-        rows.Add(new ValueRow("Smallest triangle", "", "", Size(quality.LeastArea)));
-        rows.Add(new ValueRow("Largest triangle", "", "", Size(quality.GreatestArea)));
+        rows.Add(new ValueRow("Triangles", "", "", Numbers.Count(quality.Triangles)));
+        rows.Add(new ValueRow("Nodes", "", "", Numbers.Count(quality.Nodes)));
+        rows.Add(new ValueRow("Smallest angle", "", "", KeyValues.Angle(quality.SmallestAngle)));
+        rows.Add(new ValueRow("Largest angle", "", "", KeyValues.Angle(quality.LargestAngle)));
+        rows.Add(new ValueRow("Largest triangle", "", "", $"{Numbers.Format(unit.Convert(quality.LargestArea, 2))} {unit.PowerOf(2)}"));
         rows.Add(new LegendRow(p => [new Disc(p, 11, OxyColors.Undefined, Leader)], "smallest angle"));
         foreach (var cause in mesh.Unrefined.GroupBy(u => u.Cause).OrderBy(g => g.Key))
         {
@@ -86,13 +84,13 @@ public static class MeshFigure
 
     private static void AddSharpest(Sheet sheet, Box bounds, Mesh mesh, View view, MeshQuality quality)
     {
-        var triangle = MeshMarks.Triangle(mesh, view, quality.Sharpest);
+        var triangle = MeshMarks.Triangle(mesh, view, quality.SmallestAngleTriangle);
         var middle = MeshMarks.Middle(triangle);
         var radius = Math.Max(14, 5 + triangle.Max(p => p.DistanceTo(middle)));
         sheet.Add(new Disc(middle, radius, OxyColors.Undefined, Leader));
 
         // The angle stands beside the section, level with its triangle.
-        var text = KeyValues.Angle(quality.LeastAngle);
+        var text = KeyValues.Angle(quality.SmallestAngle);
         var lettering = Lettering.Strong with { Colour = Palette.Orange };
         var right = middle.X > view.Target.X;
         var box = view.Of(bounds);

@@ -107,7 +107,10 @@ public static class OutlineFigure
                 var lettering = Lettering.Strong with { Size = Lettering.Small.Size, Colour = Palette.Orange };
                 var right = Label.LeftAt(mark.Text, place.X + 24, place.Y, lettering);
                 var left = Label.RightAt(mark.Text, place.X - 24, place.Y, lettering);
-                if (sheet.Find(right, left) is { } label)
+
+                // Away from the outline if there is room.
+                var label = place.X < view.Target.X ? sheet.Find(left, right) : sheet.Find(right, left);
+                if (label is not null)
                 {
                     sheet.AddOnPaper(label);
                 }

@@ -44,7 +44,7 @@ public static class SectionFigure
         frame.AddExtensions(sheet, view, Extension);
         OutlineMarks.AddRegions(sheet, outline, view);
         sheet.Add(MeshMarks.InnerEdges(mesh, view));
-        OutlineMarks.AddBoundaries(sheet, outline, view);
+        OutlineMarks.AddBoundaries(sheet, outline, view, 2 * properties.Area / properties.Perimeter);
         frame.AddDimensions(sheet, view);
         axes.Add(sheet, view);
         foreach (var fibre in GoverningSign.Fibres(properties))

@@ -22,7 +22,9 @@ internal static class BoundaryMarks
         sheet.Add(new Area([view.Of(boundary)], OxyColors.Undefined, StrokeOf(role)));
         foreach (var edge in boundary.Edges)
         {
-            sheet.Add(Joint(view.Of(edge.Start), scale));
+            // Joints at both ends of a short edge stay apart.
+            var room = view.Scale * edge.Length / 24;
+            sheet.Add(Joint(view.Of(edge.Start), Math.Clamp(room, 0.25, scale)));
         }
     }
 

@@ -25,7 +25,7 @@ public class SectionFileReaderTests
         Assert.Null(file.Drawing);
         Assert.Equal(["steel", "oak"], file.Materials.Select(m => m.Name));
         Assert.Equal("steel", file.Material?.Name);
-        Assert.Equal(7.85e-6, file.Material?.Density ?? 0, 1e-20);
+        Assert.Equal(7.85e-6, file.Material?.Density);
         Assert.Null(file.Materials[1].Density);
         AssertBox(new Box(25.4 - 50.8, 20, 25.4 + 50.8, 30), file.Outline);
     }

@@ -5,8 +5,8 @@ namespace MeshSection.Files.Quantities;
 /// <summary>Units of density: a unit of mass over the cube of a unit of length, as in kg/m3, kg/m³ or lb/ft^3.</summary>
 internal static class DensityUnits
 {
-    /// <summary>kg/mm³ per unit; null if the text is no unit of density.</summary>
-    public static double? Factor(string unit)
+    /// <summary>To kg/mm³; null if the text is no unit of density.</summary>
+    public static UnitFactor? Factor(string unit)
     {
         var cubed = unit.Replace("^3", "³", StringComparison.Ordinal);
         cubed = cubed.EndsWith('3') ? $"{cubed[..^1]}³" : cubed;
@@ -14,7 +14,7 @@ internal static class DensityUnits
             && volume.EndsWith('³')
             && Kilograms(mass.Trim()) is { } kilograms
             && LengthUnit.TryParse(volume[..^1], out var length) && length is not null
-            ? kilograms / Math.Pow(length.Millimetres, 3)
+            ? new UnitFactor(kilograms, Math.Pow(length.Millimetres, 3))
             : UncommonUnits.Density(cubed);
     }
 

@@ -58,10 +58,11 @@ internal sealed record QuantityReader(LengthUnit? BaseUnit)
             : throw node.Fault($"Expected a slope, but found {node.Described}.", "Write rise over run, for example \"1:6\" or 0.08.");
     }
 
-    private static double? LengthFactor(string unit) =>
-        LengthUnit.TryParse(unit, out var known) && known is not null ? known.Millimetres : UncommonUnits.Length(unit);
+    private static UnitFactor? LengthFactor(string unit) => LengthUnit.TryParse(unit, out var known) && known is not null
+        ? new UnitFactor(known.Millimetres)
+        : UncommonUnits.Length(unit);
 
-    private static double Quantity(Node node, string what, string example, Func<string, double?> factor)
+    private static double Quantity(Node node, string what, string example, Func<string, UnitFactor?> factor)
     {
         if (node.Kind != NodeKind.Text || QuantityText.Split(node.Text) is not { } quantity)
         {
@@ -78,8 +79,11 @@ internal sealed record QuantityReader(LengthUnit? BaseUnit)
             throw node.Fault($"\"{node.Text}\" has no unit.", $"Write {what} with its unit, for example {example}.");
         }
 
-        var value = quantity.Value * (factor(quantity.Unit) ?? throw WrongUnit(node, quantity.Unit, what, example));
-        return double.IsFinite(value) ? value : throw node.Fault($"\"{node.Text}\" is too large.", $"Write {what} of a real section.");
+        var toInternal = factor(quantity.Unit) ?? throw WrongUnit(node, quantity.Unit, what, example);
+        var value = toInternal.Of(quantity.Value);
+        return double.IsFinite(value)
+            ? value
+            : throw node.Fault($"\"{node.Text}\" is too large.", $"Write {what} of a real section.");
     }
 
     private static double Positive(Node node, double value, string what) => value > 0

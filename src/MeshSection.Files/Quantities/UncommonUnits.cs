@@ -10,16 +10,16 @@ namespace MeshSection.Files.Quantities;
 /// </summary>
 internal static class UncommonUnits
 {
-    /// <summary>mm per unit; null if the text is no unit of length.</summary>
-    public static double? Length(string unit) => UnitParser.Default.TryParse<UnitsNet.Units.LengthUnit>(
+    /// <summary>To mm; null if the text is no unit of length.</summary>
+    public static UnitFactor? Length(string unit) => UnitParser.Default.TryParse<UnitsNet.Units.LengthUnit>(
         unit, CultureInfo.InvariantCulture, out var known)
-        ? UnitsNet.Length.From(1, known).Millimeters
+        ? new UnitFactor(UnitsNet.Length.From(1, known).Millimeters)
         : null;
 
-    /// <summary>kg/mm³ per unit; null if the text is no unit of density.</summary>
-    public static double? Density(string unit) => UnitParser.Default.TryParse<UnitsNet.Units.DensityUnit>(
+    /// <summary>To kg/mm³; null if the text is no unit of density.</summary>
+    public static UnitFactor? Density(string unit) => UnitParser.Default.TryParse<UnitsNet.Units.DensityUnit>(
         unit, CultureInfo.InvariantCulture, out var known)
-        ? UnitsNet.Density.From(1, known).KilogramsPerCubicMillimeter
+        ? new UnitFactor(UnitsNet.Density.From(1, known).KilogramsPerCubicMillimeter)
         : null;
 
     /// <summary>The kind of quantity that has such a unit, in words; null if none has.</summary>
@@ -27,6 +27,8 @@ internal static class UncommonUnits
     {
         var name = Quantity.Infos
             .FirstOrDefault(q => UnitParser.Default.TryParse(unit, q.UnitType, CultureInfo.InvariantCulture, out _))?.Name;
-        return name is null ? null : string.Concat(name.Select((c, i) => char.IsUpper(c) ? $"{(i > 0 ? " " : "")}{char.ToLowerInvariant(c)}" : $"{c}"));
+        return name is null
+            ? null
+            : string.Concat(name.Select(c => char.IsUpper(c) ? $" {char.ToLowerInvariant(c)}" : $"{c}")).TrimStart();
     }
 }

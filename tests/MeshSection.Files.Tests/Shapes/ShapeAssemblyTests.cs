@@ -55,7 +55,7 @@ public class ShapeAssemblyTests
     [Theory]
     [InlineData("""{ "type": "rectangle", "width": 10, "height": 10, "at": [50, 45] }""", "shapes[0] (rectangle) and shapes[1] (rectangle) overlap: their outlines cross at (50, ")]
     [InlineData("""{ "type": "rectangle", "width": 10, "height": 10, "at": [55, 45] }""", "shapes[0] (rectangle) and shapes[1] (rectangle) touch at (50, ")]
-    [InlineData("""{ "type": "circle", "diameter": 20, "at": [60, 50] }""", "shapes[0] (rectangle) and shapes[1] (circle) touch at (50, 50) mm")]
+    [InlineData("""{ "type": "circle", "diameter": 20, "at": [60, 50] }""", "shapes[0] (rectangle) and shapes[1] (circle) touch at (50, 50")]
     [InlineData(Square, "shapes[0] (rectangle) and shapes[1] (rectangle) are the same outline")]
     [InlineData("""{ "type": "circle", "diameter": 20, "at": [0, 50] }""", "shapes[1] (circle) lies in the material of shapes[0] (rectangle). Add \"hole\": true")]
     [InlineData("""{ "type": "circle", "diameter": 20, "at": [90, 50], "hole": true }""", "shapes[1] (circle) is a hole, but lies in no other shape.")]

@@ -32,6 +32,11 @@ public class MeshJsonTests
         Assert.Equal(5, JsonPaths.Number(Document, "nodes"));
         Assert.Equal(45, JsonPaths.Number(Document, "minAngle"), 1e-12);
         Assert.Equal(90, JsonPaths.Number(Document, "maxAngle"), 1e-12);
+        var place = new Point(JsonPaths.Number(Document, "minAnglePlace.x"), JsonPaths.Number(Document, "minAnglePlace.y"));
+        Assert.Contains(Mesh.Nodes, node => node.DistanceTo(25.4 * place - new Point(254, -254)) < 1e-9);
+        var histogram = Document["angleHistogram"]?.AsArray().Select(n => n?.GetValue<int>()) ?? [];
+        Assert.Equal(18, histogram.Count());
+        Assert.Equal(9, histogram.Sum());
     }
 
     [Fact]

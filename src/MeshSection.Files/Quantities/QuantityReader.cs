@@ -31,7 +31,9 @@ internal sealed record QuantityReader(LengthUnit? BaseUnit)
     /// <summary>A density greater than zero, kg/mm³. It must name its unit: a bare one would be a guess.</summary>
     public static double Density(Node node) => node.Kind != NodeKind.Number
         ? Positive(node, Quantity(node, "a density", DensityExample, DensityUnits.Factor), "a density")
-        : throw node.Fault($"{Shown(node.Number)} has no unit.", $"Write a density with its unit, for example {DensityExample}.");
+        : throw node.Fault(
+            $"{Shown(node.Number)} has no unit.",
+            $"Write a density with its unit, for example {DensityExample}.");
 
     /// <summary>A unit of length.</summary>
     public static LengthUnit Unit(Node node)
@@ -55,7 +57,9 @@ internal sealed record QuantityReader(LengthUnit? BaseUnit)
 
         return node.Kind == NodeKind.Number && double.IsFinite(node.Number)
             ? node.Number
-            : throw node.Fault($"Expected a slope, but found {node.Described}.", "Write rise over run, for example \"1:6\" or 0.08.");
+            : throw node.Fault(
+                $"Expected a slope, but found {node.Described}.",
+                "Write rise over run, for example \"1:6\" or 0.08.");
     }
 
     private static UnitFactor? LengthFactor(string unit) => LengthUnit.TryParse(unit, out var known) && known is not null
@@ -66,12 +70,16 @@ internal sealed record QuantityReader(LengthUnit? BaseUnit)
     {
         if (node.Kind != NodeKind.Text || QuantityText.Split(node.Text) is not { } quantity)
         {
-            throw node.Fault($"Expected {what}, but found {node.Described}.", $"Write a number and a unit, for example {example}.");
+            throw node.Fault(
+                $"Expected {what}, but found {node.Described}.",
+                $"Write a number and a unit, for example {example}.");
         }
 
         if (quantity.Unit.StartsWith(','))
         {
-            throw node.Fault($"\"{node.Text}\" has a comma in its number.", $"Write a decimal point and no commas, for example {example}.");
+            throw node.Fault(
+                $"\"{node.Text}\" has a comma in its number.",
+                $"Write a decimal point and no commas, for example {example}.");
         }
 
         if (quantity.Unit.Length == 0)
@@ -88,7 +96,9 @@ internal sealed record QuantityReader(LengthUnit? BaseUnit)
 
     private static double Positive(Node node, double value, string what) => value > 0
         ? value
-        : throw node.Fault($"Expected {what} greater than zero, but found {node.Described}.", "Check its sign and its digits.");
+        : throw node.Fault(
+            $"Expected {what} greater than zero, but found {node.Described}.",
+            "Check its sign and its digits.");
 
     private static SectionFileException WrongUnit(Node node, string unit, string what, string example) => node.Fault(
         UncommonUnits.DimensionOf(unit) is { } dimension

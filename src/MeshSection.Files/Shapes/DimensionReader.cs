@@ -27,5 +27,7 @@ internal sealed record DimensionReader(ObjectNode Node, QuantityReader Quantitie
     /// <summary>A point as a list of its two coordinates.</summary>
     public Point Point(Node node) => node.Kind == NodeKind.List && node.Items is [var x, var y]
         ? new Point(Quantities.Length(x), Quantities.Length(y))
-        : throw node.Fault($"Expected a point, but found {node.Described}.", "Write its two coordinates, for example [120, 0].");
+        : throw node.Fault(
+            $"Expected a point, but found {node.Described}.",
+            "Write its two coordinates, for example [120, 0].");
 }

@@ -31,7 +31,9 @@ internal static class ShapeReader
     {
         var names = ShapeType.All.Select(t => t.Name).ToArray();
         var word = ObjectNode.AnyObject(node, "a shape").Members.FirstOrDefault(m => m.Key == "type")?.Value
-            ?? throw node.Fault("\"type\" is missing from a shape.", $"Add \"type\": one of {string.Join(", ", names)}.");
+            ?? throw node.Fault(
+                "\"type\" is missing from a shape.",
+                $"Add \"type\": one of {string.Join(", ", names)}.");
         var name = word.FilledText("tee");
         return ShapeType.All.FirstOrDefault(t => t.Name == name)
             ?? throw word.Fault($"There is no shape \"{name}\".", NearestWord.Advice(name, names));

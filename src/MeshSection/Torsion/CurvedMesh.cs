@@ -11,26 +11,30 @@ namespace MeshSection.Torsion;
 /// </summary>
 internal sealed class CurvedMesh
 {
-    private CurvedMesh(Mesh mesh, Point[] corners, Edge?[] curves, int[] boundaries, double deviation)
+    private CurvedMesh(Mesh mesh, Point[] corners, EdgeBow?[] bows, int[] boundaries, Point origin, double deviation)
     {
         Mesh = mesh;
         Corners = corners;
-        Curves = curves;
+        Bows = bows;
         Boundaries = boundaries;
+        Origin = origin;
         Deviation = deviation;
     }
 
     /// <summary>The mesh that was fitted; it numbers corners, triangles and edges.</summary>
     public Mesh Mesh { get; }
 
-    /// <summary>Where each corner lies, mm.</summary>
+    /// <summary>Where each corner lies, about <see cref="Origin"/>, mm.</summary>
     public Point[] Corners { get; }
 
-    /// <summary>At 3t + k the curve that is the edge opposite corner k of triangle t, or null if it is straight.</summary>
-    public Edge?[] Curves { get; }
+    /// <summary>At 3t + k how the edge opposite corner k of triangle t bows, or null if it is straight.</summary>
+    public EdgeBow?[] Bows { get; }
 
     /// <summary>At 3t + k the boundary of the outline on which that edge lies, or -1 for an edge inside.</summary>
     public int[] Boundaries { get; }
+
+    /// <summary>The origin of the coordinates, in the outline's own.</summary>
+    public Point Origin { get; }
 
     /// <summary>
     /// Greatest distance of the covered region from the true outline, mm: 0 unless a curve comes so close to another
@@ -61,28 +65,25 @@ internal sealed class CurvedMesh
     }
 
     /// <summary>The same mesh with another point as its origin.</summary>
-    /// <param name="origin">The point, mm.</param>
+    /// <param name="origin">The point, in the outline's coordinates, mm.</param>
     public CurvedMesh About(Point origin)
     {
         var corners = new Point[Corners.Length];
         for (var i = 0; i < corners.Length; i++)
         {
-            corners[i] = Corners[i] - origin;
+            corners[i] = Corners[i] + (Origin - origin);
         }
 
-        var curves = new Edge?[Curves.Length];
-        for (var e = 0; e < curves.Length; e++)
-        {
-            curves[e] = Curves[e]?.Placed(Placement.Moved(-origin.X, -origin.Y));
-        }
-
-        return new CurvedMesh(Mesh, corners, curves, Boundaries, Deviation);
+        return new CurvedMesh(Mesh, corners, Bows, Boundaries, origin, Deviation);
     }
 
-    /// <summary>The area inside each boundary of the outline, mm²; negative for a hole, which runs clockwise.</summary>
-    public double[] EnclosedAreas()
+    /// <summary>
+    /// The moments of the region inside each boundary of the outline, about the origin, by Green's theorem; negative for
+    /// a hole, which runs clockwise.
+    /// </summary>
+    public AreaMoments[] EnclosedMoments()
     {
-        var areas = new double[Boundaries.Max() + 1];
+        var moments = new AreaMoments[Boundaries.Max() + 1];
         for (var e = 0; e < Boundaries.Length; e++)
         {
             if (Boundaries[e] < 0)
@@ -90,19 +91,32 @@ internal sealed class CurvedMesh
                 continue;
             }
 
-            var area = 0.5 * Corners[MeshEdge.From(Mesh, e)].Cross(Corners[MeshEdge.To(Mesh, e)]);
-            areas[Boundaries[e]] += Curves[e] is Edge curve ? area + CapQuadrature.Moments(curve, Point.Origin).Area : area;
+            // The triangle from the origin to the edge, and what lies between the edge and its curve.
+            var (a, b) = (Corners[MeshEdge.From(Mesh, e)], Corners[MeshEdge.To(Mesh, e)]);
+            var t = 0.5 * a.Cross(b);
+            var sum = a + b;
+            moments[Boundaries[e]] += new AreaMoments(
+                t,
+                t * sum.X / 3,
+                t * sum.Y / 3,
+                t * (a.X * a.X + a.X * b.X + b.X * b.X) / 6,
+                t * (a.Y * a.Y + a.Y * b.Y + b.Y * b.Y) / 6,
+                t * (a.X * a.Y + b.X * b.Y + sum.X * sum.Y) / 12);
+            if (Bows[e] is EdgeBow bow)
+            {
+                moments[Boundaries[e]] += CapQuadrature.Moments(bow.Curve, Origin);
+            }
         }
 
-        return areas;
+        return moments;
     }
 
     private static CurvedMesh Fit(FlatOutline flat, Mesh mesh, bool[] isCurved)
     {
         var corners = mesh.Nodes.ToArray();
         var boundaries = new int[mesh.Segments.Length];
-        var parts = new Edge?[mesh.Segments.Length];
-        for (var e = 0; e < parts.Length; e++)
+        var bows = new EdgeBow?[mesh.Segments.Length];
+        for (var e = 0; e < bows.Length; e++)
         {
             var s = mesh.Segments[e];
             boundaries[e] = s < 0 ? -1 : flat.Chords[s].Place.Boundary;
@@ -116,7 +130,7 @@ internal sealed class CurvedMesh
             var (t0, t1) = (Fraction(mesh, segment, from), Fraction(mesh, segment, to));
             var curve = flat.Chords[s].Curve;
             var part = t0 == 0 && t1 == 1 ? curve : curve.Part(t0, t1);
-            parts[e] = part;
+            bows[e] = new EdgeBow(part, e % 3);
             (corners[from], corners[to]) = (part.Start, part.End);
         }
 
@@ -126,7 +140,7 @@ internal sealed class CurvedMesh
             deviation = Math.Max(deviation, isCurved[s] ? 0 : flat.Chords[s].Curve.Sag);
         }
 
-        return new CurvedMesh(mesh, corners, parts, boundaries, deviation);
+        return new CurvedMesh(mesh, corners, bows, boundaries, Point.Origin, deviation);
     }
 
     /// <summary>Where a node lies on its segment: exactly 0 and 1 at the ends.</summary>

@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using MeshSection.Geometry;
 
 namespace MeshSection.Torsion;
@@ -8,14 +9,15 @@ namespace MeshSection.Torsion;
 /// </summary>
 /// <remarks>
 /// On a triangle with curved edges the place is x = Σ λᵢ xᵢ + Σ λₐ λᵦ g(t), over the edges from corner a to b, with
-/// t = (1 + λᵦ - λₐ)/2 and g(t) = (curve(t) - chord(t)) / (t (1 - t)): on the edge the curve itself, on the two others
+/// t = (1 + λᵦ - λₐ)/2 and g as in <see cref="EdgeBow"/>: on the edge the curve itself, on the two others
 /// nothing. With g constant it is the isoparametric triangle of second order.
 /// </remarks>
 /// <param name="mesh">The fitted mesh.</param>
 internal sealed class ElementPoint(CurvedMesh mesh)
 {
     private readonly Point[] _corners = new Point[3];
-    private readonly Edge?[] _curves = new Edge?[3];
+    private readonly EdgeBow?[] _bows = new EdgeBow?[3];
+    private readonly Point[] _byLambda = new Point[3];
     private readonly double[] _lambdaX = new double[3];
     private readonly double[] _lambdaY = new double[3];
     private TriangleRule _rule = TriangleRule.Straight;
@@ -60,8 +62,8 @@ internal sealed class ElementPoint(CurvedMesh mesh)
         for (var k = 0; k < 3; k++)
         {
             _corners[k] = mesh.Corners[mesh.Mesh.Corners[3 * triangle + k]];
-            _curves[k] = mesh.Curves[3 * triangle + k];
-            IsCurved |= _curves[k] is not null;
+            _bows[k] = mesh.Bows[3 * triangle + k];
+            IsCurved |= _bows[k] is not null;
         }
 
         _rule = IsCurved ? TriangleRule.Curved : TriangleRule.Straight;
@@ -72,6 +74,7 @@ internal sealed class ElementPoint(CurvedMesh mesh)
     }
 
     /// <summary>Goes to one of the triangle's points.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
     public void Move(int index)
     {
         var (xi, eta) = (_rule.Xi[index], _rule.Eta[index]);
@@ -79,7 +82,7 @@ internal sealed class ElementPoint(CurvedMesh mesh)
         var place = lambda[0] * _corners[0] + xi * _corners[1] + eta * _corners[2];
         if (IsCurved)
         {
-            place += Bend(lambda);
+            place += Bend(index, lambda);
         }
 
         (X, Y) = (place.X, place.Y);
@@ -97,29 +100,27 @@ internal sealed class ElementPoint(CurvedMesh mesh)
     }
 
     /// <summary>What the curves add to the place; sets the gradients of the bent triangle.</summary>
-    private Point Bend(ReadOnlySpan<double> lambda)
+    [MethodImpl(MethodImplOptions.AggressiveOptimization)]
+    private Point Bend(int index, ReadOnlySpan<double> lambda)
     {
         Point bend = default;
-        var byLambda = _corners.AsSpan().ToArray();
+        _corners.CopyTo(_byLambda, 0);
         for (var k = 0; k < 3; k++)
         {
-            if (_curves[k] is not Edge curve)
+            if (_bows[k] is not EdgeBow bow)
             {
                 continue;
             }
 
             var (a, b) = ((k + 1) % 3, (k + 2) % 3);
-            var t = 0.5 * (1 + lambda[b] - lambda[a]);
-            var bubble = t * (1 - t);
-            var g = (curve.PointAt(t) - curve.Start - t * curve.Chord) / bubble;
-            var slope = (curve.Length * curve.TangentAt(t) - curve.Chord - (1 - 2 * t) * g) / bubble;
+            var (g, slope) = (bow.Values[index], bow.Slopes[index]);
             var product = lambda[a] * lambda[b];
             bend += product * g;
-            byLambda[a] += lambda[b] * g - 0.5 * product * slope;
-            byLambda[b] += lambda[a] * g + 0.5 * product * slope;
+            _byLambda[a] += lambda[b] * g - 0.5 * product * slope;
+            _byLambda[b] += lambda[a] * g + 0.5 * product * slope;
         }
 
-        SetGradients(byLambda[1] - byLambda[0], byLambda[2] - byLambda[0]);
+        SetGradients(_byLambda[1] - _byLambda[0], _byLambda[2] - _byLambda[0]);
         return bend;
     }
 

@@ -1,5 +1,3 @@
-using MeshSection.Integration;
-
 namespace MeshSection.Torsion;
 
 /// <summary>Integrals over the section of the warping and shear fields, in the notation of <see cref="WarpingFields"/>.</summary>
@@ -22,10 +20,13 @@ internal sealed record FieldIntegrals
     /// <summary>∫ |τ|² dA, mm⁴: no less than the torsion constant for any warping function.</summary>
     public double Torsion { get; private set; }
 
-    /// <summary>∫ x ω dA, mm⁵, with ω less its mean.</summary>
+    /// <summary>∫ ω dA, mm⁴.</summary>
+    private double FirstWarping { get; set; }
+
+    /// <summary>∫ x ω dA, mm⁵, whatever the mean of ω, since the origin is the centroid.</summary>
     public double XWarping { get; private set; }
 
-    /// <summary>∫ y ω dA, mm⁵, with ω less its mean.</summary>
+    /// <summary>∫ y ω dA, mm⁵.</summary>
     public double YWarping { get; private set; }
 
     /// <summary>∫ ω² dA, mm⁶, with ω less its mean.</summary>
@@ -46,30 +47,6 @@ internal sealed record FieldIntegrals
     /// <summary>Moment of τ₂ about the origin, mm⁵.</summary>
     public double Moment2 { get; private set; }
 
-    /// <summary>The moments of area alone, about the mesh's origin.</summary>
-    public static AreaMoments Moments(CurvedMesh mesh)
-    {
-        var point = new ElementPoint(mesh);
-        double area = 0, sx = 0, sy = 0, xx = 0, yy = 0, xy = 0;
-        for (var t = 0; t < mesh.Mesh.TriangleCount; t++)
-        {
-            point.Enter(t);
-            for (var q = 0; q < point.Count; q++)
-            {
-                point.Move(q);
-                var (x, y, da) = (point.X, point.Y, point.Weight);
-                area += da;
-                sx += da * x;
-                sy += da * y;
-                xx += da * x * x;
-                yy += da * y * y;
-                xy += da * x * y;
-            }
-        }
-
-        return new AreaMoments(area, sx, sy, xx, yy, xy);
-    }
-
     /// <summary>Integrates the fields.</summary>
     /// <param name="mesh">The fitted mesh, about its centroid.</param>
     /// <param name="nodes">Its nodes.</param>
@@ -78,7 +55,6 @@ internal sealed record FieldIntegrals
     public static FieldIntegrals Of(CurvedMesh mesh, QuadraticNodes nodes, WarpingFields fields, double poissonRatio)
     {
         var sums = new FieldIntegrals();
-        var mean = MeanWarping(mesh, nodes, fields.Warping);
         var point = new ElementPoint(mesh);
         for (var t = 0; t < mesh.Mesh.TriangleCount; t++)
         {
@@ -87,38 +63,18 @@ internal sealed record FieldIntegrals
             for (var q = 0; q < point.Count; q++)
             {
                 point.Move(q);
-                sums.Add(point, triangle, fields, poissonRatio, mean);
+                sums.Add(point, triangle, fields, poissonRatio);
             }
         }
 
+        sums.WarpingSquare -= sums.FirstWarping * sums.FirstWarping / sums.Area;
         return sums;
     }
 
-    private static double MeanWarping(CurvedMesh mesh, QuadraticNodes nodes, double[] warping)
-    {
-        var point = new ElementPoint(mesh);
-        double area = 0, sum = 0;
-        for (var t = 0; t < mesh.Mesh.TriangleCount; t++)
-        {
-            point.Enter(t);
-            for (var q = 0; q < point.Count; q++)
-            {
-                point.Move(q);
-                area += point.Weight;
-                for (var i = 0; i < Nodes; i++)
-                {
-                    sum += point.Weight * point.Shape[i] * warping[nodes.Triangles[Nodes * t + i]];
-                }
-            }
-        }
-
-        return sum / area;
-    }
-
-    private void Add(ElementPoint point, ReadOnlySpan<int> triangle, WarpingFields fields, double nu, double mean)
+    private void Add(ElementPoint point, ReadOnlySpan<int> triangle, WarpingFields fields, double nu)
     {
         var (x, y, area) = (point.X, point.Y, point.Weight);
-        double w = -mean, wx = -y, wy = x;
+        double w = 0, wx = -y, wy = x;
         var (half, product) = (0.5 * nu * (x * x - y * y), nu * x * y);
         double ax = -half, ay = -product, bx = -product, by = half;
         for (var i = 0; i < Nodes; i++)
@@ -140,6 +96,7 @@ internal sealed record FieldIntegrals
         YY += area * y * y;
         XY += area * x * y;
         Torsion += area * (wx * wx + wy * wy);
+        FirstWarping += area * w;
         XWarping += area * x * w;
         YWarping += area * y * w;
         WarpingSquare += area * w * w;

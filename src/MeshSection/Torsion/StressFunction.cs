@@ -18,69 +18,68 @@ internal static class StressFunction
     /// <summary>The lower bound of the torsion constant J, mm⁴.</summary>
     /// <param name="mesh">The fitted mesh of one connected region.</param>
     /// <param name="nodes">Its nodes.</param>
+    /// <param name="sums">Its matrices and loads.</param>
     /// <param name="outer">The outer boundary; all others are holes.</param>
-    public static double LowerBound(CurvedMesh mesh, QuadraticNodes nodes, int outer)
+    /// <param name="enclosed">The area inside each boundary, mm², negative for holes.</param>
+    public static double LowerBound(
+        CurvedMesh mesh, QuadraticNodes nodes, ElementSums sums, int outer, ReadOnlySpan<double> enclosed)
     {
-        var (unknowns, interior, holes) = Unknowns(mesh, nodes, outer);
-        var load = new double[interior + holes.Length];
-        holes.CopyTo(load, interior);
-        AddAreaLoads(mesh, unknowns, load);
-        var matrix = Stiffness.Assemble(mesh, unknowns, load.Length);
-        var psi = (double[])load.Clone();
-        SparseCholesky.Factor(SymbolicCholesky.Of(matrix.Pattern), matrix).Solve(psi);
+        var boundaries = BoundaryNodes(mesh, nodes);
+        var (unknowns, interior) = Unknowns(nodes, boundaries, outer);
+        var load = new double[interior + enclosed.Length - 1];
+        for (var node = 0; node < unknowns.Length; node++)
+        {
+            if (unknowns[node] >= 0)
+            {
+                load[unknowns[node]] += 2 * sums.Area[node];
+            }
+        }
 
+        for (var b = 0; b < enclosed.Length; b++)
+        {
+            if (b != outer)
+            {
+                load[interior + Hole(b, outer)] -= 2 * enclosed[b];
+            }
+        }
+
+        var matrix = sums.Assemble(unknowns, load.Length);
+        var psi = load.AsSpan().ToArray();
+        SparseCholesky.Factor(SymbolicCholesky.Of(matrix.Pattern), matrix).Solve(psi);
         var work = Dot(load, psi);
         return work * work / Dot(psi, matrix.Times(psi));
     }
 
     /// <summary>
-    /// The unknown at each slot of the triangles: those inside by their rank, then one for each hole; -1 on the outer
-    /// boundary. Also the load 2 Aₖ of each hole.
+    /// The unknown of each node: those inside by their rank, then one for each hole; -1 on the outer boundary.
     /// </summary>
-    private static (int[] Unknowns, int Interior, double[] Holes) Unknowns(CurvedMesh mesh, QuadraticNodes nodes, int outer)
+    private static (int[] Unknowns, int Interior) Unknowns(QuadraticNodes nodes, int[] boundaries, int outer)
     {
-        var boundaries = BoundaryNodes(mesh, nodes);
-        var areas = mesh.EnclosedAreas();
-        var holeNumbers = new int[areas.Length];
-        var holes = new double[areas.Length - 1];
-        for (var b = 0; b < areas.Length; b++)
-        {
-            if (b != outer)
-            {
-                holeNumbers[b] = b < outer ? b : b - 1;
-                holes[holeNumbers[b]] = 2 * Math.Abs(areas[b]);
-            }
-        }
-
         var byRank = new int[nodes.Count];
         for (var node = 0; node < nodes.Count; node++)
         {
             byRank[nodes.Ranks[node]] = node;
         }
 
-        var unknownOf = new int[nodes.Count];
+        var unknowns = new int[nodes.Count];
         var interior = 0;
         foreach (var node in byRank)
         {
-            unknownOf[node] = boundaries[node] < 0 ? interior++ : -1;
+            unknowns[node] = boundaries[node] < 0 ? interior++ : -1;
         }
 
         for (var node = 0; node < nodes.Count; node++)
         {
             if (boundaries[node] >= 0 && boundaries[node] != outer)
             {
-                unknownOf[node] = interior + holeNumbers[boundaries[node]];
+                unknowns[node] = interior + Hole(boundaries[node], outer);
             }
         }
 
-        var unknowns = new int[nodes.Triangles.Length];
-        for (var slot = 0; slot < unknowns.Length; slot++)
-        {
-            unknowns[slot] = unknownOf[nodes.Triangles[slot]];
-        }
-
-        return (unknowns, interior, holes);
+        return (unknowns, interior);
     }
+
+    private static int Hole(int boundary, int outer) => boundary < outer ? boundary : boundary - 1;
 
     /// <summary>The boundary on which each node lies, or -1.</summary>
     private static int[] BoundaryNodes(CurvedMesh mesh, QuadraticNodes nodes)
@@ -101,27 +100,6 @@ internal static class StressFunction
         }
 
         return boundaries;
-    }
-
-    private static void AddAreaLoads(CurvedMesh mesh, int[] unknowns, double[] load)
-    {
-        var point = new ElementPoint(mesh);
-        for (var t = 0; t < mesh.Mesh.TriangleCount; t++)
-        {
-            point.Enter(t);
-            for (var q = 0; q < point.Count; q++)
-            {
-                point.Move(q);
-                for (var i = 0; i < Nodes; i++)
-                {
-                    var unknown = unknowns[Nodes * t + i];
-                    if (unknown >= 0)
-                    {
-                        load[unknown] += 2 * point.Weight * point.Shape[i];
-                    }
-                }
-            }
-        }
     }
 
     private static double Dot(double[] a, double[] b)

@@ -33,12 +33,15 @@ public static class TorsionAnalysis
 
         var fitted = CurvedMesh.Fit(flat, mesh);
         var centre = flat.Outline.Bounds.Centre;
-        var centroid = centre + FieldIntegrals.Moments(fitted.About(centre)).Centroid;
+        var whole = fitted.About(centre).EnclosedMoments().Aggregate((sum, part) => sum + part);
+        var centroid = centre + whole.Centroid;
         fitted = fitted.About(centroid);
-        var nodes = QuadraticNodes.Of(mesh);
+        var enclosed = fitted.EnclosedMoments().Select(m => m.Area).ToArray();
         var outer = flat.Outline.Boundaries.IndexOf(flat.Outline.Boundaries.Single(b => b.Role == BoundaryRole.Outer));
-        var lower = StressFunction.LowerBound(fitted, nodes, outer);
-        var fields = WarpingFields.Solve(fitted, nodes, poissonRatio);
+        var nodes = QuadraticNodes.Of(mesh);
+        var sums = ElementSums.Of(fitted, nodes, poissonRatio);
+        var lower = StressFunction.LowerBound(fitted, nodes, sums, outer, enclosed);
+        var fields = WarpingFields.Solve(nodes, sums);
         var integrals = FieldIntegrals.Of(fitted, nodes, fields, poissonRatio);
         var (area, ix, iy, ixy) = (integrals.Area, integrals.YY, integrals.XX, integrals.XY);
 

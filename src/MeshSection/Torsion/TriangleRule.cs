@@ -14,7 +14,7 @@ internal sealed class TriangleRule
     public static TriangleRule Straight { get; } = Dunavant4();
 
     /// <summary>
-    /// Gauss-Legendre points of two directions, the square folded onto the triangle, exact to degree 14: on a triangle
+    /// Gauss-Legendre points of two directions, the square folded onto the triangle, exact to degree 8: on a triangle
     /// with a curved edge the integrands are smooth but no polynomials.
     /// </summary>
     public static TriangleRule Curved { get; } = Folded();
@@ -41,25 +41,16 @@ internal sealed class TriangleRule
 
     private static TriangleRule Folded()
     {
-        // Eight points on (0, 1) (Abramowitz and Stegun, Table 25.4).
-        ReadOnlySpan<double> half = [0.1834346424956498, 0.5255324099163290, 0.7966664774136267, 0.9602898564975363];
-        ReadOnlySpan<double> halfWeights = [0.3626837833783620, 0.3137066458778873, 0.2223810344533745, 0.1012285362903763];
-        var (t, w) = (new double[8], new double[8]);
-        for (var i = 0; i < 4; i++)
+        // Five points on (0, 1) (Abramowitz and Stegun, Table 25.4).
+        ReadOnlySpan<double> t = [0.0469100770306680, 0.2307653449471585, 0.5, 0.7692346550528415, 0.9530899229693320];
+        ReadOnlySpan<double> w = [0.1184634425280945, 0.2393143352496832, 0.2844444444444444, 0.2393143352496832, 0.1184634425280945];
+        var (xi, eta, weights) = (new double[25], new double[25], new double[25]);
+        for (var i = 0; i < 25; i++)
         {
-            (t[2 * i], t[2 * i + 1]) = (0.5 * (1 - half[i]), 0.5 * (1 + half[i]));
-            w[2 * i] = w[2 * i + 1] = 0.5 * halfWeights[i];
-        }
-
-        var (xi, eta, weights) = (new double[64], new double[64], new double[64]);
-        for (var i = 0; i < 8; i++)
-        {
-            for (var j = 0; j < 8; j++)
-            {
-                xi[8 * i + j] = t[i];
-                eta[8 * i + j] = (1 - t[i]) * t[j];
-                weights[8 * i + j] = w[i] * w[j] * (1 - t[i]);
-            }
+            var (a, b) = (i / 5, i % 5);
+            xi[i] = t[a];
+            eta[i] = (1 - t[a]) * t[b];
+            weights[i] = w[a] * w[b] * (1 - t[a]);
         }
 
         return new TriangleRule(xi, eta, weights);

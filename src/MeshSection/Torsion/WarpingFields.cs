@@ -21,68 +21,47 @@ namespace MeshSection.Torsion;
 /// <param name="Shear2">φ₂ at each node, mm³.</param>
 internal sealed record WarpingFields(double[] Warping, double[] Shear1, double[] Shear2)
 {
-    private const int Nodes = QuadraticNodes.PerTriangle;
-
     /// <summary>Solves for the three fields.</summary>
-    /// <param name="mesh">The fitted mesh, about its centroid.</param>
-    /// <param name="nodes">Its nodes.</param>
-    /// <param name="poissonRatio">ν.</param>
-    public static WarpingFields Solve(CurvedMesh mesh, QuadraticNodes nodes, double poissonRatio)
+    /// <param name="nodes">The nodes of the fitted mesh.</param>
+    /// <param name="sums">Its matrices and loads.</param>
+    public static WarpingFields Solve(QuadraticNodes nodes, ElementSums sums)
     {
         // The node ranked last is the one that is held.
-        var held = nodes.Count - 1;
-        var unknowns = new int[nodes.Triangles.Length];
-        for (var slot = 0; slot < unknowns.Length; slot++)
+        var count = nodes.Count - 1;
+        var unknowns = new int[nodes.Count];
+        for (var node = 0; node < unknowns.Length; node++)
         {
-            var rank = nodes.Ranks[nodes.Triangles[slot]];
-            unknowns[slot] = rank == held ? -1 : rank;
+            unknowns[node] = nodes.Ranks[node] == count ? -1 : nodes.Ranks[node];
         }
 
-        var (warping, shear1, shear2) = (new double[held], new double[held], new double[held]);
-        AddLoads(mesh, unknowns, poissonRatio, warping, shear1, shear2);
-        var matrix = Stiffness.Assemble(mesh, unknowns, held);
+        var matrix = sums.Assemble(unknowns, count);
+        var (warping, shear1, shear2) = (Load(sums.Warping), Load(sums.Shear1), Load(sums.Shear2));
         SparseCholesky.Factor(SymbolicCholesky.Of(matrix.Pattern), matrix).Solve(warping, shear1, shear2);
-        return new WarpingFields(AtNodes(warping, nodes), AtNodes(shear1, nodes), AtNodes(shear2, nodes));
-    }
+        return new WarpingFields(AtNodes(warping), AtNodes(shear1), AtNodes(shear2));
 
-    private static void AddLoads(
-        CurvedMesh mesh, int[] unknowns, double nu, double[] warping, double[] shear1, double[] shear2)
-    {
-        var point = new ElementPoint(mesh);
-        for (var t = 0; t < mesh.Mesh.TriangleCount; t++)
+        double[] Load(double[] atNodes)
         {
-            point.Enter(t);
-            for (var q = 0; q < point.Count; q++)
+            var load = new double[count];
+            for (var node = 0; node < unknowns.Length; node++)
             {
-                point.Move(q);
-                var (x, y, area) = (point.X, point.Y, point.Weight);
-                var (growth, half, product) = (2 * (1 + nu), 0.5 * nu * (x * x - y * y), nu * x * y);
-                for (var i = 0; i < Nodes; i++)
+                if (unknowns[node] >= 0)
                 {
-                    var unknown = unknowns[Nodes * t + i];
-                    if (unknown < 0)
-                    {
-                        continue;
-                    }
-
-                    var (v, vx, vy) = (point.Shape[i], point.ShapeX[i], point.ShapeY[i]);
-                    warping[unknown] += area * (y * vx - x * vy);
-                    shear1[unknown] += area * (growth * x * v + half * vx + product * vy);
-                    shear2[unknown] += area * (growth * y * v + product * vx - half * vy);
+                    load[unknowns[node]] = atNodes[node];
                 }
             }
-        }
-    }
 
-    private static double[] AtNodes(double[] unknowns, QuadraticNodes nodes)
-    {
-        var values = new double[nodes.Count];
-        for (var node = 0; node < values.Length; node++)
+            return load;
+        }
+
+        double[] AtNodes(double[] solution)
         {
-            var rank = nodes.Ranks[node];
-            values[node] = rank < unknowns.Length ? unknowns[rank] : 0;
-        }
+            var values = new double[unknowns.Length];
+            for (var node = 0; node < values.Length; node++)
+            {
+                values[node] = unknowns[node] < 0 ? 0 : solution[unknowns[node]];
+            }
 
-        return values;
+            return values;
+        }
     }
 }

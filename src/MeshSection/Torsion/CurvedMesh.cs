@@ -53,15 +53,21 @@ internal sealed class CurvedMesh
             isCurved[s] = flat.Chords[s].Curve.Sag > 0;
         }
 
-        // Each round straightens at least one more chord.
-        while (true)
+        // First only nodes on the outline move; if that folds triangles, those inside follow; then, round by round,
+        // curves are given up where that does not help.
+        var fitted = Fit(flat, mesh, isCurved, isRelaxed: false);
+        if (!FoldedTriangles.Exist(fitted))
         {
-            var fitted = Fit(flat, mesh, isCurved);
-            if (!FoldedTriangles.Straighten(fitted, isCurved))
-            {
-                return fitted;
-            }
+            return fitted;
         }
+
+        do
+        {
+            fitted = Fit(flat, mesh, isCurved, isRelaxed: true);
+        }
+        while (FoldedTriangles.Straighten(fitted, isCurved));
+
+        return fitted;
     }
 
     /// <summary>The same mesh with another point as its origin.</summary>
@@ -111,7 +117,7 @@ internal sealed class CurvedMesh
         return moments;
     }
 
-    private static CurvedMesh Fit(FlatOutline flat, Mesh mesh, bool[] isCurved)
+    private static CurvedMesh Fit(FlatOutline flat, Mesh mesh, bool[] isCurved, bool isRelaxed)
     {
         var corners = mesh.Nodes.ToArray();
         var boundaries = new int[mesh.Segments.Length];
@@ -132,6 +138,11 @@ internal sealed class CurvedMesh
             var part = t0 == 0 && t1 == 1 ? curve : curve.Part(t0, t1);
             bows[e] = new EdgeBow(part, e % 3);
             (corners[from], corners[to]) = (part.Start, part.End);
+        }
+
+        if (isRelaxed)
+        {
+            NodeRelaxation.Run(mesh, corners);
         }
 
         var deviation = 0.0;

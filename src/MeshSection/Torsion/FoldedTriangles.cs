@@ -8,6 +8,21 @@ internal static class FoldedTriangles
     // Least over greatest stretch of a triangle at its integration points: enough to be sure of those in between.
     private const double LeastStretch = 0.05;
 
+    /// <summary>True if there is one.</summary>
+    public static bool Exist(CurvedMesh fitted)
+    {
+        var point = new ElementPoint(fitted);
+        for (var t = 0; t < fitted.Mesh.TriangleCount; t++)
+        {
+            if (IsFolded(point, t))
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
+
     /// <summary>
     /// Takes the curves from around every folded triangle. Returns false if there is none, so that the fit is sound.
     /// </summary>

@@ -3,7 +3,7 @@ using System.Text.Json.Serialization;
 
 namespace MeshSection.Tests.Verification;
 
-/// <summary>A section with published properties, as in published-values.json.</summary>
+/// <summary>A section with published properties, as in the published-*.json files.</summary>
 public sealed record PublishedCase(
     string Id, string Title, string Source, string Basis, IReadOnlyList<PublishedQuantity> Quantities, string? Note = null)
 {
@@ -12,12 +12,15 @@ public sealed record PublishedCase(
         UnmappedMemberHandling = JsonUnmappedMemberHandling.Disallow,
     };
 
-    /// <summary>Every case, in the order of the file.</summary>
-    public static IReadOnlyList<PublishedCase> All { get; } = Read();
+    /// <summary>Every case of area properties, in the order of the file.</summary>
+    public static IReadOnlyList<PublishedCase> All { get; } = Read("published-values.json");
 
-    private static List<PublishedCase> Read()
+    /// <summary>Every case of torsion and shear, in the order of the file.</summary>
+    public static IReadOnlyList<PublishedCase> Torsion { get; } = Read("published-torsion.json");
+
+    private static List<PublishedCase> Read(string name)
     {
-        using var file = File.OpenRead(Path.Combine(AppContext.BaseDirectory, "Verification", "published-values.json"));
+        using var file = File.OpenRead(Path.Combine(AppContext.BaseDirectory, "Verification", name));
         return JsonSerializer.Deserialize<List<PublishedCase>>(file, Format)!;
     }
 }

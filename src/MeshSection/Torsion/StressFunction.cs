@@ -27,6 +27,12 @@ internal static class StressFunction
         var boundaries = BoundaryNodes(mesh, nodes);
         var (unknowns, interior) = Unknowns(nodes, boundaries, outer);
         var load = new double[interior + enclosed.Length - 1];
+        if (load.Length == 0)
+        {
+            // Every node lies on the boundary, as in a single triangle: only ψ = 0 is left.
+            return 0;
+        }
+
         for (var node = 0; node < unknowns.Length; node++)
         {
             if (unknowns[node] >= 0)

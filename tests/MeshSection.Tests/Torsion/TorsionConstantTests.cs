@@ -1,3 +1,5 @@
+using MeshSection.Geometry;
+using MeshSection.Meshing;
 using MeshSection.Sections.Shapes;
 using MeshSection.Torsion;
 
@@ -79,6 +81,18 @@ public class TorsionConstantTests
         var j = Solids.RectangleConstant(ratio);
         Assert.Equal(j, p.TorsionConstant.Value, 2e-6 * j);
         Assert.InRange(j, p.TorsionConstant.Lower, p.TorsionConstant.Upper);
+    }
+
+    [Fact]
+    public void A_single_triangle_has_bounds_too()
+    {
+        var outline = Outline.Create(Solids.Triangle(1));
+        var flat = Flattening.For(outline).Apply(outline);
+        var mesh = new DelaunayMesher().Triangulate(flat.Graph, new MeshSettings(), TestContext.Current.CancellationToken);
+        Assert.Equal(1, mesh.TriangleCount);
+        var p = TorsionAnalysis.Of(flat, mesh);
+        Assert.Equal(0, p.TorsionConstant.Lower);
+        Assert.InRange(p.TorsionConstant.Upper, Math.Sqrt(3) / 80, Math.Sqrt(3) / 48);
     }
 
     [Fact]

@@ -14,7 +14,7 @@ public class TorsionConstantTests
     public void The_bounds_hold_the_known_value_on_every_mesh(string name)
     {
         var solid = Solids.Named(name);
-        foreach (var triangles in new[] { 10, 60, 400 })
+        foreach (var triangles in new[] { 10, 80, 300 })
         {
             var p = TorsionPipeline.Of(solid.Boundaries, triangles);
             var slack = Math.Max(solid.Uncertainty, 1e-12) * solid.Constant;

@@ -10,24 +10,29 @@ internal static class PublishedTorsionSections
 {
     private const double Triangles = 1000;
 
-    public static double Value(string id, string quantity, string unit)
+    public static (Outline Outline, TorsionProperties Properties) Compute(string id)
     {
         var outline = Outline(id);
-        var p = TorsionPipeline.Of(outline, Triangles, PoissonRatio(id));
-        return Value(outline, p, quantity) / Factor(unit);
+        return (outline, TorsionPipeline.Of(outline, Triangles, PoissonRatio(id)));
     }
 
-    private static double Value(Outline outline, TorsionProperties p, string quantity) => quantity switch
+    /// <summary>A figure by its name in the command's JSON, in a unit.</summary>
+    public static double Value((Outline Outline, TorsionProperties Properties) computed, string quantity, string unit)
     {
-        "torsionConstant.value" => p.TorsionConstant.Value,
-        "shearCentre.x" => p.ShearCentre.X,
-        "elasticShearCentre.x" => p.ElasticShearCentre.X,
-        "shearCentreFromCentroid.x" => p.ShearCentre.X - Pipeline.Properties(outline).Centroid.X,
-        "warpingConstant" => p.WarpingConstant,
-        "shearCoefficient.x" => p.ShearCoefficientX,
-        "shearCoefficient.y" => p.ShearCoefficientY,
-        _ => throw new ArgumentOutOfRangeException(nameof(quantity), quantity, "No property has this name."),
-    };
+        var p = computed.Properties;
+        var value = quantity switch
+        {
+            "torsionConstant.value" => p.TorsionConstant.Value,
+            "shearCentre.x" => p.ShearCentre.X,
+            "elasticShearCentre.x" => p.ElasticShearCentre.X,
+            "shearCentreFromCentroid.x" => p.ShearCentre.X - Pipeline.Properties(computed.Outline).Centroid.X,
+            "warpingConstant" => p.WarpingConstant,
+            "shearCoefficient.x" => p.ShearCoefficientX,
+            "shearCoefficient.y" => p.ShearCoefficientY,
+            _ => throw new ArgumentOutOfRangeException(nameof(quantity), quantity, "No property has this name."),
+        };
+        return value / Factor(unit);
+    }
 
     private static double PoissonRatio(string id) =>
         id.EndsWith("-nu0.25", StringComparison.Ordinal) ? 0.25 : id.EndsWith("-nu0.3", StringComparison.Ordinal) ? 0.3 : 0;

@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 using MeshSection.Dxf.Selection;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf;

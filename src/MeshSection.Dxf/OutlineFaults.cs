@@ -4,7 +4,7 @@ using MeshSection.Dxf.Curves;
 using MeshSection.Dxf.Entities;
 using MeshSection.Dxf.Loops;
 using MeshSection.Dxf.Selection;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf;

@@ -1,4 +1,4 @@
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf;
 

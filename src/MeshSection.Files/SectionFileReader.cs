@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Files.Quantities;
 using MeshSection.Files.Shapes;
 using MeshSection.Files.Tree;

@@ -4,6 +4,7 @@ using MeshSection.Meshing;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Layout;
 using MeshSection.Sections;
+using MeshSection.Units;
 using OxyPlot;
 
 namespace MeshSection.Plots;
@@ -19,7 +20,7 @@ public static class MeshFigure
     /// <param name="unit">The unit for every number on the picture.</param>
     /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
     /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
-    public static Figure Of(Section section, Mesh mesh, DisplayUnit unit, PictureSize? size = null)
+    public static Figure Of(Section section, Mesh mesh, LengthUnit unit, PictureSize? size = null)
     {
         ArgumentNullException.ThrowIfNull(section);
         ArgumentNullException.ThrowIfNull(mesh);
@@ -50,14 +51,14 @@ public static class MeshFigure
         return new Box(above.MinX + 130, above.MinY + 10, above.MaxX - 130, above.MaxY - 20);
     }
 
-    private static ImmutableArray<PanelRow> Rows(Mesh mesh, MeshQuality quality, DisplayUnit unit)
+    private static ImmutableArray<PanelRow> Rows(Mesh mesh, MeshQuality quality, LengthUnit unit)
     {
         var rows = ImmutableArray.CreateBuilder<PanelRow>();
         rows.Add(new ValueRow("Triangles", "", "", Numbers.Count(quality.Triangles)));
         rows.Add(new ValueRow("Nodes", "", "", Numbers.Count(quality.Nodes)));
         rows.Add(new ValueRow("Smallest angle", "", "", KeyValues.Angle(quality.SmallestAngle)));
         rows.Add(new ValueRow("Largest angle", "", "", KeyValues.Angle(quality.LargestAngle)));
-        rows.Add(new ValueRow("Largest triangle", "", "", $"{Numbers.Format(unit.Convert(quality.LargestArea, 2))} {unit.PowerOf(2)}"));
+        rows.Add(new ValueRow("Largest triangle", "", "", $"{Numbers.Format(unit.FromMillimetres(quality.LargestArea, 2))} {unit.SymbolOf(2)}"));
         rows.Add(new LegendRow(p => [new Disc(p, 11, OxyColors.Undefined, Leader)], "smallest angle"));
         foreach (var cause in mesh.Unrefined.GroupBy(u => u.Cause).OrderBy(g => g.Key))
         {

@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Layout;
+using MeshSection.Units;
 using OxyPlot;
 
 namespace MeshSection.Plots;
@@ -24,7 +25,7 @@ public static class OutlineFigure
     /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
     /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
     public static Figure Of(
-        Outline outline, string title, DisplayUnit unit, IReadOnlyList<OutlineMark> marks, PictureSize? size = null)
+        Outline outline, string title, LengthUnit unit, IReadOnlyList<OutlineMark> marks, PictureSize? size = null)
     {
         ArgumentNullException.ThrowIfNull(outline);
         ArgumentNullException.ThrowIfNull(title);

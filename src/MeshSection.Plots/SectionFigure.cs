@@ -3,6 +3,7 @@ using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Layout;
 using MeshSection.Properties;
 using MeshSection.Sections;
+using MeshSection.Units;
 
 namespace MeshSection.Plots;
 
@@ -22,7 +23,7 @@ public static class SectionFigure
     /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
     /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
     public static Figure Of(
-        Section section, Mesh mesh, SectionProperties properties, DisplayUnit unit, PictureSize? size = null)
+        Section section, Mesh mesh, SectionProperties properties, LengthUnit unit, PictureSize? size = null)
     {
         ArgumentNullException.ThrowIfNull(section);
         ArgumentNullException.ThrowIfNull(mesh);

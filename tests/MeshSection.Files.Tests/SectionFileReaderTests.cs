@@ -1,4 +1,4 @@
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Geometry;
 
 namespace MeshSection.Files.Tests;

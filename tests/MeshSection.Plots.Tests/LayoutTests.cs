@@ -1,6 +1,7 @@
 using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Tests.Samples;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Tests;
 
@@ -18,7 +19,7 @@ public class LayoutTests
         foreach (var size in Sizes)
         {
             CheckLabels(Hostile.Named(name).Figure(size));
-            CheckLabels(Hostile.Named(name).Figure(size, new DisplayUnit("in", 25.4)));
+            CheckLabels(Hostile.Named(name).Figure(size, LengthUnit.Inch));
         }
     }
 
@@ -29,7 +30,7 @@ public class LayoutTests
         var sample = Hostile.Named(name);
         foreach (var size in Sizes)
         {
-            CheckLabels(MeshFigure.Of(sample.Section, sample.Mesh, DisplayUnit.Millimetre, size));
+            CheckLabels(MeshFigure.Of(sample.Section, sample.Mesh, LengthUnit.Millimetre, size));
         }
     }
 
@@ -40,7 +41,7 @@ public class LayoutTests
         var sample = Hostile.Named(name);
         foreach (var size in Sizes)
         {
-            CheckLabels(OutlineFigure.Of(sample.Section.Outline, sample.Section.Title, DisplayUnit.Millimetre, [], size));
+            CheckLabels(OutlineFigure.Of(sample.Section.Outline, sample.Section.Title, LengthUnit.Millimetre, [], size));
         }
     }
 
@@ -48,9 +49,9 @@ public class LayoutTests
     public void Labels_of_a_crowded_outline_stay_on_the_picture_and_apart()
     {
         OutlineMark[] marks = [.. Enumerable.Range(0, 60).Select(i => new OutlineMark(new Point(7 * i, 3 * i), "duplicate left out"))];
-        CheckLabels(OutlineFigure.Of(Outlines.Perforated(), "Perforated", DisplayUnit.Millimetre, marks));
-        CheckLabels(OutlineFigure.Of(Outlines.Plate(), "Plate", DisplayUnit.Millimetre, marks));
-        CheckLabels(OutlineFigure.Of(Outlines.Strip(), "Strip", DisplayUnit.Millimetre, marks));
+        CheckLabels(OutlineFigure.Of(Outlines.Perforated(), "Perforated", LengthUnit.Millimetre, marks));
+        CheckLabels(OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, marks));
+        CheckLabels(OutlineFigure.Of(Outlines.Strip(), "Strip", LengthUnit.Millimetre, marks));
     }
 
     [Theory]
@@ -64,7 +65,7 @@ public class LayoutTests
             var labels = sample.Figure(size).Marks.OfType<Label>().ToList();
             var texts = labels.Select(l => l.Text).ToList();
             var bounds = sample.Section.Outline.Bounds;
-            var lengths = new Layout.LengthScale(DisplayUnit.Millimetre, Math.Max(bounds.Width, bounds.Height));
+            var lengths = new Layout.LengthScale(LengthUnit.Millimetre, Math.Max(bounds.Width, bounds.Height));
             double[] expected =
             [
                 properties.ElasticX.Positive.Distance, properties.ElasticX.Negative.Distance,

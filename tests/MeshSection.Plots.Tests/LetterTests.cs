@@ -1,5 +1,6 @@
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Tests.Samples;
+using MeshSection.Units;
 using OxyPlot;
 using SkiaSharp;
 
@@ -22,8 +23,8 @@ public class LetterTests
         IEnumerable<Figure> figures =
         [
             .. Hostile.All.Select(h => h.Sample.Figure()),
-            OutlineFigure.Of(Outlines.Plate(), "Plate", DisplayUnit.Millimetre, []),
-            MeshFigure.Of(Sample.Angle().Section, Sample.Angle().Mesh, DisplayUnit.Millimetre),
+            OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, []),
+            MeshFigure.Of(Sample.Angle().Section, Sample.Angle().Mesh, LengthUnit.Millimetre),
         ];
         var letters = figures.SelectMany(f => f.Marks.OfType<Label>()).SelectMany(l => l.Text).Distinct().ToArray();
 

@@ -1,6 +1,7 @@
 using MeshSection.Meshing;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Tests.Samples;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Tests;
 
@@ -10,7 +11,7 @@ public class MeshFigureTests
     public void Every_edge_is_drawn_once()
     {
         var sample = Sample.Tube("Tube", 60, 80, 40, 5);
-        var segments = MeshFigure.Of(sample.Section, sample.Mesh, DisplayUnit.Millimetre).Marks.OfType<Segments>().ToArray();
+        var segments = MeshFigure.Of(sample.Section, sample.Mesh, LengthUnit.Millimetre).Marks.OfType<Segments>().ToArray();
 
         Assert.Equal([2 * (3 * 40 * 5 - 40), 2 * 2 * 40], segments.Select(s => s.Ends.Length));
     }
@@ -20,7 +21,7 @@ public class MeshFigureTests
     {
         // Cells of 30 by 10, cut in two: atan(1/3), and a right angle.
         var sample = Sample.Rectangle(90, 10, 30);
-        var figure = MeshFigure.Of(sample.Section, sample.Mesh, DisplayUnit.Millimetre);
+        var figure = MeshFigure.Of(sample.Section, sample.Mesh, LengthUnit.Millimetre);
         Assert.Equal(2, figure.Marks.OfType<Label>().Count(l => l.Text == "18.43°"));
         Assert.Contains(figure.Marks.OfType<Label>(), l => l.Text == "150 mm²");
         Assert.Single(figure.Marks.OfType<Area>(), a => a.Fill == Palette.Orange);
@@ -32,7 +33,7 @@ public class MeshFigureTests
         var sample = Sample.Rectangle(100, 50, 10);
         var causes = Enum.GetValues<UnrefinedCause>();
         var mesh = With(sample.Mesh, [.. causes.SelectMany((c, i) => Enumerable.Range(0, i + 1).Select(k => new UnrefinedTriangle(10 * i + k, default, 5, c)))]);
-        var figure = MeshFigure.Of(sample.Section, mesh, DisplayUnit.Millimetre);
+        var figure = MeshFigure.Of(sample.Section, mesh, LengthUnit.Millimetre);
 
         var lines = figure.Marks.OfType<Label>().Where(l => l.Text.Contains("unrefined", StringComparison.Ordinal)).Select(l => l.Text).ToArray();
         Assert.Equal(causes.Length, lines.Distinct().Count());

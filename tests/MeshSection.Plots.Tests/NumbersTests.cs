@@ -1,6 +1,7 @@
 using CsCheck;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Layout;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Tests;
 
@@ -34,7 +35,7 @@ public class NumbersTests
     [Fact]
     public void Parts_of_a_chain_share_their_decimals()
     {
-        var lengths = new LengthScale(DisplayUnit.Millimetre, 150);
+        var lengths = new LengthScale(LengthUnit.Millimetre, 150);
         Assert.Equal("98.61", lengths.Format(98.60526));
         Assert.Equal("0.05", lengths.Format(0.05263));
         Assert.Equal("0", lengths.Format(-0.001));
@@ -44,11 +45,11 @@ public class NumbersTests
     [Fact]
     public void Lengths_out_of_plain_size_share_a_power_of_ten()
     {
-        var tiny = new LengthScale(DisplayUnit.Millimetre, 3e-6);
+        var tiny = new LengthScale(LengthUnit.Millimetre, 3e-6);
         Assert.Equal("1.5", tiny.Format(1.5e-6));
         Assert.Equal("dimensions in 10⁻⁶ mm", tiny.Note);
 
-        var huge = new LengthScale(new DisplayUnit("m", 1000), 3e9);
+        var huge = new LengthScale(LengthUnit.Metre, 3e9);
         Assert.Equal("1.5", huge.Format(1.5e9));
         Assert.Equal("dimensions in 10⁶ m", huge.Note);
     }

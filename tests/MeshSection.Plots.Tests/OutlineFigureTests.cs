@@ -2,6 +2,7 @@ using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Layout;
 using MeshSection.Plots.Tests.Samples;
+using MeshSection.Units;
 using OxyPlot;
 
 namespace MeshSection.Plots.Tests;
@@ -77,7 +78,7 @@ public class OutlineFigureTests
     }
 
     private static Figure Of(Outline outline, params OutlineMark[] marks) =>
-        OutlineFigure.Of(outline, "Title", DisplayUnit.Millimetre, marks);
+        OutlineFigure.Of(outline, "Title", LengthUnit.Millimetre, marks);
 
     private static HashSet<string> Texts(Figure figure) => [.. figure.Marks.OfType<Label>().Select(l => l.Text)];
 

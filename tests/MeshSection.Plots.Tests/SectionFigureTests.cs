@@ -2,6 +2,7 @@ using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
 using MeshSection.Plots.Tests.Samples;
 using MeshSection.Sections;
+using MeshSection.Units;
 using OxyPlot;
 
 namespace MeshSection.Plots.Tests;
@@ -21,7 +22,7 @@ public class SectionFigureTests
     [Fact]
     public void Values_are_converted_to_the_unit_asked_for()
     {
-        var texts = Texts(Sample.Rectangle(254, 127, 25.4).Figure(unit: new DisplayUnit("in", 25.4)));
+        var texts = Texts(Sample.Rectangle(254, 127, 25.4).Figure(unit: LengthUnit.Inch));
         Assert.Superset(
             new HashSet<string>(["50 in²", "104.17 in⁴", "416.67 in⁴", "41.667 in³", "83.333 in³", "dimensions in in"]),
             new HashSet<string>(texts));
@@ -82,7 +83,7 @@ public class SectionFigureTests
             ElasticX = Moved(sample.Properties.ElasticX),
             ElasticY = Moved(sample.Properties.ElasticY),
         };
-        var moved = SectionFigure.Of(new Section(outline, Title: sample.Section.Title), sample.Mesh, properties, DisplayUnit.Millimetre);
+        var moved = SectionFigure.Of(new Section(outline, Title: sample.Section.Title), sample.Mesh, properties, LengthUnit.Millimetre);
         var home = sample.Figure();
 
         Assert.Contains($"10×10⁶ mm", Texts(moved));

@@ -1,5 +1,5 @@
 using MeshSection.Dxf.Entities;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf.Curves;

@@ -1,5 +1,5 @@
 using System.Collections.Immutable;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf.Entities;
 

@@ -1,6 +1,6 @@
 using System.Text;
 using MeshSection.Dxf.Tags;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf.Entities;
 

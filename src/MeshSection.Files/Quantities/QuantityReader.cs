@@ -1,5 +1,5 @@
 using System.Globalization;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Files.Tree;
 
 namespace MeshSection.Files.Quantities;

@@ -1,5 +1,5 @@
 using System.Text.Json;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Geometry;
 using MeshSection.Meshing;
 

@@ -1,6 +1,7 @@
 using System.Text.Json;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Properties;
+using MeshSection.Torsion;
 
 namespace MeshSection.Files.Results;
 
@@ -12,16 +13,19 @@ public static class PropertiesJson
 {
     /// <summary>Writes the properties as a document: one indented object and a line end.</summary>
     /// <param name="stream">Where to; left open.</param>
-    /// <param name="properties">The properties.</param>
+    /// <param name="properties">The area properties.</param>
+    /// <param name="torsion">Torsion and shear; null for a section in separate pieces, which has no one torsion constant.</param>
     /// <param name="unit">The unit of length to write them in.</param>
-    public static void Write(Stream stream, SectionProperties properties, LengthUnit unit) =>
-        ResultWriter.Document(stream, json => Write(json, properties, unit));
+    public static void Write(Stream stream, SectionProperties properties, TorsionProperties? torsion, LengthUnit unit) =>
+        ResultWriter.Document(stream, json => Write(json, properties, torsion, unit));
 
     /// <summary>Writes the properties as one object.</summary>
     /// <param name="json">Where to; at a place where an object may begin.</param>
-    /// <param name="properties">The properties.</param>
+    /// <param name="properties">The area properties.</param>
+    /// <param name="torsion">Torsion and shear; null for a section in separate pieces, which has no one torsion constant.</param>
     /// <param name="unit">The unit of length to write them in.</param>
-    public static void Write(Utf8JsonWriter json, SectionProperties properties, LengthUnit unit)
+    public static void Write(
+        Utf8JsonWriter json, SectionProperties properties, TorsionProperties? torsion, LengthUnit unit)
     {
         var writer = new ResultWriter(json, unit);
         json.WriteStartObject();
@@ -30,6 +34,11 @@ public static class PropertiesJson
         SecondMoments(writer, properties);
         Elastic(writer, properties);
         Plastic(writer, properties);
+        if (torsion is not null)
+        {
+            Torsion(writer, torsion);
+        }
+
         Member(writer, properties);
         Checks(writer, properties);
         json.WriteEndObject();
@@ -119,6 +128,25 @@ public static class PropertiesJson
             writer.Number("1", value(p.Plastic1), power);
             writer.Number("2", value(p.Plastic2), power);
         });
+    }
+
+    private static void Torsion(ResultWriter writer, TorsionProperties t)
+    {
+        writer.Object("torsionConstant", () =>
+        {
+            writer.Number("value", t.TorsionConstant.Value, 4);
+            writer.Number("lower", t.TorsionConstant.Lower, 4);
+            writer.Number("upper", t.TorsionConstant.Upper, 4);
+        });
+        writer.Point("shearCentre", t.ShearCentre);
+        writer.Number("warpingConstant", t.WarpingConstant, 6);
+        writer.Object("shearArea", () =>
+        {
+            writer.Number("x", t.ShearAreaX, 2);
+            writer.Number("y", t.ShearAreaY, 2);
+            writer.Number("poissonRatio", t.PoissonRatio);
+        });
+        writer.Number("outlineDeviation", t.OutlineDeviation, 1);
     }
 
     private static void Member(ResultWriter writer, SectionProperties p)

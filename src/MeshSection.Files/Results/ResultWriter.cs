@@ -1,6 +1,6 @@
 using System.Text.Encodings.Web;
 using System.Text.Json;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Geometry;
 
 namespace MeshSection.Files.Results;
@@ -8,8 +8,6 @@ namespace MeshSection.Files.Results;
 /// <summary>Writes results as JSON objects, lengths in the unit that they are shown in.</summary>
 internal readonly struct ResultWriter(Utf8JsonWriter json, LengthUnit unit)
 {
-    private readonly Scale _scale = new(unit);
-
     public Utf8JsonWriter Json { get; } = json;
 
     /// <summary>Writes one object to a stream, indented, with a line end behind it.</summary>
@@ -45,10 +43,11 @@ internal readonly struct ResultWriter(Utf8JsonWriter json, LengthUnit unit)
         Json.WriteEndObject();
     }
 
-    /// <summary>A number in mm to a power; 0 for one without unit.</summary>
-    public void Number(string key, double value, int power = 0) => Json.WriteNumber(key, _scale.Of(value, power));
+    /// <summary>A number in mm to a power; 0 for one without unit. A negative zero loses its sign.</summary>
+    public void Number(string key, double value, int power = 0) => 
+        Json.WriteNumber(key, unit.FromMillimetres(value, power) + 0.0);
 
-    public void PerLength(string key, double value) => Json.WriteNumber(key, _scale.PerLength(value));
+    public void PerLength(string key, double value) => Json.WriteNumber(key, value * unit.Millimetres);
 
     public void Point(string key, Point point)
     {

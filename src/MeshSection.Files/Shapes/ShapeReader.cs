@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 using System.Globalization;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Files.Quantities;
 using MeshSection.Files.Tree;
 using MeshSection.Geometry;

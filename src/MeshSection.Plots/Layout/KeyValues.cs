@@ -1,18 +1,19 @@
 using System.Collections.Immutable;
 using MeshSection.Plots.Drawing;
 using MeshSection.Properties;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Layout;
 
 /// <summary>The values that a checker looks for first.</summary>
 internal static class KeyValues
 {
-    public static ImmutableArray<PanelRow> Of(SectionProperties properties, DisplayUnit unit)
+    public static ImmutableArray<PanelRow> Of(SectionProperties properties, LengthUnit unit)
     {
         // A centroid on an axis of the drawing is 0 and not the rounding that is left of it.
         var box = properties.BoundingBox;
         var least = 1e-9 * box.Diagonal;
-        string Value(double value, int power) => $"{Numbers.Format(unit.Convert(value, power))} {unit.PowerOf(power)}";
+        string Value(double value, int power) => $"{Numbers.Format(unit.FromMillimetres(value, power))} {unit.SymbolOf(power)}";
         string Coordinate(double value) => Value(Math.Abs(value) < least ? 0 : value, 1);
 
         var x = properties.ElasticX;

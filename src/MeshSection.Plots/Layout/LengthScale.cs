@@ -1,5 +1,6 @@
 using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Layout;
 
@@ -9,16 +10,16 @@ namespace MeshSection.Plots.Layout;
 /// </summary>
 internal sealed class LengthScale
 {
-    private readonly DisplayUnit unit;
+    private readonly LengthUnit unit;
     private readonly int exponent;
     private readonly int decimals;
 
     /// <param name="unit">The unit to state.</param>
     /// <param name="largest">The largest length of the drawing, mm.</param>
-    public LengthScale(DisplayUnit unit, double largest)
+    public LengthScale(LengthUnit unit, double largest)
     {
         this.unit = unit;
-        var size = unit.Convert(largest, 1);
+        var size = unit.FromMillimetres(largest, 1);
         exponent = Numbers.SharedExponent(size);
         decimals = Numbers.DecimalsFor(size / Math.Pow(10, exponent));
     }
@@ -32,5 +33,5 @@ internal sealed class LengthScale
     public string NoteOn(Box bounds) => $"{Format(bounds.Width)} × {Format(bounds.Height)}, {Note}";
 
     public string Format(double millimetres) =>
-        Numbers.Fixed(unit.Convert(millimetres, 1) / Math.Pow(10, exponent), decimals);
+        Numbers.Fixed(unit.FromMillimetres(millimetres, 1) / Math.Pow(10, exponent), decimals);
 }

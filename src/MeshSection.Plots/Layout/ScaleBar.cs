@@ -1,5 +1,6 @@
 using MeshSection.Geometry;
 using MeshSection.Plots.Drawing;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Layout;
 
@@ -13,7 +14,7 @@ internal static class ScaleBar
     /// <summary>The part of a box that the bar leaves at its foot.</summary>
     public static Box Above(Box area) => area with { MaxY = area.MaxY - Height };
 
-    public static void Add(Sheet sheet, double unitsPerMillimetre, DisplayUnit unit, string note)
+    public static void Add(Sheet sheet, double unitsPerMillimetre, LengthUnit unit, string note)
     {
         var perUnit = unitsPerMillimetre * unit.Millimetres;
         var length = RoundLength(Longest / perUnit);

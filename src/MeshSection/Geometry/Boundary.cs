@@ -16,6 +16,27 @@ public sealed class Boundary
     /// <summary>The smallest box that holds the loop.</summary>
     public Box Bounds => Edges.Aggregate(Box.Empty, (box, e) => box.With(e.Bounds));
 
+    /// <summary>Area enclosed, mm²; positive if the loop runs counter-clockwise.</summary>
+    public double SignedArea
+    {
+        get
+        {
+            // The polygon of the chords, and the caps on them.
+            var anchor = Edges[0].Start;
+            var area = 0.0;
+            foreach (var edge in Edges)
+            {
+                area += 0.5 * (edge.Start - anchor).Cross(edge.End - anchor);
+                if (edge is ArcEdge arc)
+                {
+                    area += Cap.Of(arc).Area;
+                }
+            }
+
+            return area;
+        }
+    }
+
     /// <summary>Makes a boundary of a chain of edges.</summary>
     /// <param name="edges">At least two edges, each beginning in the same bits in which the one before it ends.</param>
     /// <exception cref="ArgumentException">The chain is broken, open, or has fewer than two edges.</exception>

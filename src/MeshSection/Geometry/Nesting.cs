@@ -7,7 +7,7 @@ internal static class Nesting
 {
     public static ImmutableArray<NestedBoundary> Of(ImmutableArray<Boundary> loops, out int regionCount)
     {
-        var areas = loops.Select(SignedArea).ToArray();
+        var areas = loops.Select(b => b.SignedArea).ToArray();
         var boxes = loops.Select(b => b.Bounds).ToArray();
         var bySize = Enumerable.Range(0, loops.Length).OrderByDescending(i => Math.Abs(areas[i])).ToArray();
         var parents = new int[loops.Length];
@@ -50,22 +50,5 @@ internal static class Nesting
         }
 
         return nested.MoveToImmutable();
-    }
-
-    /// <summary>Area enclosed, counter-clockwise positive: the polygon of the chords and the caps on them.</summary>
-    internal static double SignedArea(Boundary loop)
-    {
-        var anchor = loop.Edges[0].Start;
-        var area = 0.0;
-        foreach (var edge in loop.Edges)
-        {
-            area += 0.5 * (edge.Start - anchor).Cross(edge.End - anchor);
-            if (edge is ArcEdge arc)
-            {
-                area += Cap.Of(arc).Area;
-            }
-        }
-
-        return area;
     }
 }

@@ -51,7 +51,7 @@ internal static class OutlineCheck
         {
             // Relative to the loop's own box on both sides, so that a thin plate is not taken for nothing.
             var scale = loops[b].Length * Math.Max(loops[b].Bounds.Diagonal, AreaRatio * size);
-            if (Math.Abs(Nesting.SignedArea(loops[b])) <= AreaRatio * scale)
+            if (Math.Abs(loops[b].SignedArea) <= AreaRatio * scale)
             {
                 throw new OutlineException(
                     OutlineFault.NoArea, origin + loops[b].Edges[0].Start, new EdgePlace(b, 0));

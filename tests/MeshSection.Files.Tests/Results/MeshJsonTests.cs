@@ -1,6 +1,6 @@
 using System.Text;
 using System.Text.Json.Nodes;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Files.Results;
 using MeshSection.Geometry;
 using MeshSection.Meshing;

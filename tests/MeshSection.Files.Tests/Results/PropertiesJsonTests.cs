@@ -1,7 +1,7 @@
 using System.Globalization;
 using System.Text;
 using System.Text.Json.Nodes;
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using MeshSection.Files.Results;
 using MeshSection.Geometry;
 using MeshSection.Properties;

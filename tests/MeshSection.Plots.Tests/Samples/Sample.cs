@@ -3,14 +3,15 @@ using MeshSection.Geometry;
 using MeshSection.Meshing;
 using MeshSection.Properties;
 using MeshSection.Sections;
+using MeshSection.Units;
 
 namespace MeshSection.Plots.Tests.Samples;
 
 /// <summary>A section with a mesh and properties made by hand, apart from the engine's own mesher and analyses.</summary>
 internal sealed record Sample(Section Section, Mesh Mesh, SectionProperties Properties)
 {
-    public Figure Figure(PictureSize? size = null, DisplayUnit? unit = null) =>
-        SectionFigure.Of(Section, Mesh, Properties, unit ?? DisplayUnit.Millimetre, size);
+    public Figure Figure(PictureSize? size = null, LengthUnit? unit = null) =>
+        SectionFigure.Of(Section, Mesh, Properties, unit ?? LengthUnit.Millimetre, size);
 
     public Sample Titled(string title) => this with { Section = Section with { Title = title } };
 

@@ -26,7 +26,7 @@ public class OutlineTests
         Assert.Equal(3, outline.RegionCount);
         Assert.All(
             outline.Boundaries,
-            b => Assert.Equal(b.Role != BoundaryRole.Hole, Nesting.SignedArea(b.Boundary) > 0));
+            b => Assert.Equal(b.Role != BoundaryRole.Hole, b.Boundary.SignedArea > 0));
     }
 
     [Fact]

@@ -1,9 +1,9 @@
-using MeshSection.Dxf.Units;
+using MeshSection.Units;
 using static MeshSection.Dxf.Tests.DxfText;
 
-namespace MeshSection.Dxf.Tests.Units;
+namespace MeshSection.Tests.Units;
 
-public class LengthUnitTest
+public class LengthUnitTests
 {
     [Theory]
     [InlineData("mm", 1)]

@@ -1,6 +1,6 @@
 using System.Collections.Immutable;
 
-namespace MeshSection.Dxf.Units;
+namespace MeshSection.Units;
 
 /// <summary>A unit of length, as drawings and people name it.</summary>
 /// <param name="Symbol">The short form, such as "mm".</param>
@@ -89,6 +89,15 @@ public sealed record LengthUnit(string Symbol, string Name, double Millimetres)
             ? unit
             : throw new FormatException(
                 $"'{text}' is no unit of length. Known are {string.Join(", ", ByCode.Select(u => u.Symbol))}.");
+
+    /// <summary>A quantity in a power of mm, in the same power of this unit.</summary>
+    /// <param name="value">The quantity, mm to the power.</param>
+    /// <param name="power">The power of length; 0 for a quantity without.</param>
+    public double FromMillimetres(double value, int power = 1) => value / Math.Pow(Millimetres, power);
+
+    /// <summary>The symbol of a power of the unit: "mm", "mm⁴".</summary>
+    /// <param name="power">The power, 1 to 9.</param>
+    public string SymbolOf(int power) => power == 1 ? Symbol : Symbol + "⁰¹²³⁴⁵⁶⁷⁸⁹"[power];
 
     /// <inheritdoc/>
     public override string ToString() => Symbol;

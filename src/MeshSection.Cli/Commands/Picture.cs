@@ -1,0 +1,27 @@
+using MeshSection.Cli.Options;
+using MeshSection.Plots;
+
+namespace MeshSection.Cli.Commands;
+
+/// <summary>Saves the picture that --out asks for.</summary>
+internal static class Picture
+{
+    /// <summary>Draws and saves a figure, and says where.</summary>
+    /// <exception cref="CommandException">The file cannot be written.</exception>
+    public static void Save(Figure figure, string path, Terminal terminal, OutputRequest output)
+    {
+        try
+        {
+            PngWriter.Save(figure, path);
+        }
+        catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
+        {
+            throw new CommandException($"--out {path}: cannot be written: {fault.Message}");
+        }
+
+        if (!output.IsQuiet && !output.IsJson)
+        {
+            terminal.Output.WriteLine($"Picture: {path}");
+        }
+    }
+}

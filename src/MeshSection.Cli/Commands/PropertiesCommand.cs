@@ -1,0 +1,55 @@
+using System.CommandLine;
+using MeshSection.Cli.Inputs;
+using MeshSection.Cli.Options;
+using MeshSection.Cli.Tables;
+using MeshSection.Files.Results;
+using MeshSection.Plots;
+using MeshSection.Properties;
+using MeshSection.Torsion;
+
+namespace MeshSection.Cli.Commands;
+
+/// <summary>Every area property of a section, each by two methods.</summary>
+internal static class PropertiesCommand
+{
+    public static Command Create(Terminal terminal)
+    {
+        var (input, mesh, output) = (new InputOptions(), new MeshOptions(), new OutputOptions());
+        var density = new DensityOption();
+        var command = new Command("properties", "Compute every area property of a section.");
+        input.AddTo(command);
+        density.AddTo(command);
+        mesh.AddTo(command);
+        output.AddTo(command);
+        command.SetAction(parsed => Run(
+            terminal,
+            input.Of(parsed) with { Density = density.Of(parsed) },
+            mesh.Of(parsed),
+            output.Of(parsed)));
+        return command;
+    }
+
+    private static int Run(Terminal terminal, InputRequest request, MeshRequest meshRequest, OutputRequest output)
+    {
+        var input = SectionInput.Read(request);
+        var (flat, mesh) = meshRequest.Apply(input.Section, input.Unit);
+        var properties = PropertiesAnalysis.Of(input.Section, flat, mesh);
+        var torsion = input.Section.Outline.RegionCount == 1 ? TorsionAnalysis.Of(flat, mesh) : null;
+        if (output.IsJson)
+        {
+            terminal.WriteJson(stream => PropertiesJson.Write(stream, properties, torsion, input.Unit));
+        }
+        else if (!output.IsQuiet)
+        {
+            PropertiesTable.Write(terminal.Tables(), input, properties, torsion);
+        }
+
+        if (output.Picture is { } picture)
+        {
+            Picture.Save(SectionFigure.Of(input.Section, mesh, properties, input.Unit), picture, terminal, output);
+        }
+
+        Cautions.Write(terminal, input, output);
+        return CrossCheckVerdict.Status(terminal, properties);
+    }
+}

@@ -1,0 +1,3 @@
+using MeshSection.Cli;
+
+return CommandLine.Run(args, Terminal.OfProcess());

@@ -1,0 +1,92 @@
+using MeshSection.Cli.Inputs;
+using MeshSection.Meshing;
+using Spectre.Console;
+
+namespace MeshSection.Cli.Tables;
+
+/// <summary>The table of <c>meshsection mesh</c>.</summary>
+internal static class MeshTable
+{
+    private const int BarWidth = 30;
+    private const int MostListed = 12;
+
+    /// <summary>Writes the table.</summary>
+    public static void Write(IAnsiConsole console, SectionInput input, FlatOutline flat, Mesh mesh)
+    {
+        var lengths = new Lengths(input.Unit);
+        var quality = MeshQuality.Of(mesh);
+        Heading.Write(console, input);
+        console.Write(Summary(input, flat, mesh, quality, lengths));
+        console.Write(Histogram(quality));
+        if (!mesh.Unrefined.IsEmpty)
+        {
+            console.Write(Unrefined(input, mesh, lengths));
+        }
+    }
+
+    private static Table Summary(SectionInput input, FlatOutline flat, Mesh mesh, MeshQuality quality, Lengths lengths)
+    {
+        var origin = input.Section.Outline.Origin;
+        var size = input.Section.Outline.Bounds.Diagonal;
+        var table = TableStyle.Columns("Mesh", "");
+        table.AddRow("triangles", TableStyle.Number(quality.Triangles));
+        table.AddRow("nodes", TableStyle.Number(quality.Nodes));
+        table.AddRow("regions", TableStyle.Number(input.Section.Outline.RegionCount));
+        table.AddRow(
+            "smallest angle", $"{Digits.Of(quality.SmallestAngle)}° at {lengths.Of(origin + quality.SmallestAnglePlace, size)}");
+        table.AddRow("largest angle", $"{Digits.Of(quality.LargestAngle)}°");
+        table.AddRow("largest triangle", $"{lengths.Of(quality.LargestArea, 2)} {lengths.Symbol(2)}");
+        table.AddRow(
+            "chords",
+            flat.MaxSag == 0 ? "no curves" : $"within {lengths.Of(flat.MaxSag)} {lengths.Symbol()} of their curves");
+        table.AddRow("not refined", mesh.Unrefined.IsEmpty ? "none" : TableStyle.Number(mesh.Unrefined.Length));
+        return table;
+    }
+
+    private static Table Histogram(MeshQuality quality)
+    {
+        var table = TableStyle.Columns("Angles", "count", "");
+        var most = quality.AngleHistogram.Max();
+        for (var bin = 0; bin < quality.AngleHistogram.Length; bin++)
+        {
+            var count = quality.AngleHistogram[bin];
+            if (count > 0)
+            {
+                table.AddRow(
+                    $"{10 * bin} to {10 * (bin + 1)}°",
+                    TableStyle.Number(count),
+                    new string('#', (int)Math.Ceiling((double)BarWidth * count / most)));
+            }
+        }
+
+        return table;
+    }
+
+    private static Table Unrefined(SectionInput input, Mesh mesh, Lengths lengths)
+    {
+        var outline = input.Section.Outline;
+        var table = TableStyle.Columns("Not refined", "angle", "cause");
+        foreach (var triangle in mesh.Unrefined.OrderBy(u => u.Angle).Take(MostListed))
+        {
+            table.AddRow(
+                lengths.Of(outline.Origin + triangle.Place, outline.Bounds.Diagonal),
+                Digits.Of(triangle.Angle) + "°",
+                Cause(triangle.Cause));
+        }
+
+        if (mesh.Unrefined.Length > MostListed)
+        {
+            table.AddRow($"and {mesh.Unrefined.Length - MostListed} more", "", "");
+        }
+
+        return table;
+    }
+
+    private static string Cause(UnrefinedCause cause) => cause switch
+    {
+        UnrefinedCause.InputAngle => "a small angle of the outline itself",
+        UnrefinedCause.NodeLimit => "the limit on nodes was reached",
+        UnrefinedCause.LeastEdge => "the coordinates' digits end here",
+        _ => throw new ArgumentOutOfRangeException(nameof(cause)),
+    };
+}

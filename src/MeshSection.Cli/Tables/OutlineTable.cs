@@ -1,0 +1,98 @@
+using MeshSection.Cli.Inputs;
+using MeshSection.Dxf;
+using MeshSection.Dxf.Selection;
+using MeshSection.Geometry;
+using Spectre.Console;
+
+namespace MeshSection.Cli.Tables;
+
+/// <summary>The table of <c>meshsection outline</c>.</summary>
+internal static class OutlineTable
+{
+    /// <summary>Writes the table.</summary>
+    public static void Write(IAnsiConsole console, SectionInput input)
+    {
+        var lengths = new Lengths(input.Unit);
+        Heading.Write(console, input);
+        if (input.Drawing is { } drawing)
+        {
+            console.Write(Source(drawing.Report));
+        }
+
+        console.Write(Boundaries(input, lengths));
+        if (input.Drawing is { Report: var report })
+        {
+            Entities(console, "Used", report.Used);
+            Entities(console, "Left out", report.LeftOut);
+            Notes(console, "Repaired", report.Repairs);
+            Notes(console, "Cautions", report.Cautions);
+        }
+    }
+
+    private static Table Source(DrawingReport report)
+    {
+        var table = TableStyle.Columns("Drawing", "");
+        var unit = report.Unit;
+        var box = report.Extents;
+        table.AddRow("release", report.Release ?? "not stated");
+        table.AddRow("unit", $"{unit.Symbol}, {(report.IsUnitGiven ? "as given" : "as the drawing states")}");
+        table.AddRow("extents", $"{Digits.Of(box.Width)} × {Digits.Of(box.Height)} {unit.Symbol}, from ({Digits.Of(box.MinX)}, {Digits.Of(box.MinY)})");
+        table.AddRow("ends joined up to", $"{Digits.Of(report.MaxGap)} {unit.Symbol}, {(report.IsMaxGapGiven ? "as given" : "from the drawing's size")}");
+        table.AddRow("pieces", $"{report.Pieces}, joined at {report.Joins} places");
+        return table;
+    }
+
+    private static Table Boundaries(SectionInput input, Lengths lengths)
+    {
+        var table = TableStyle.Columns(
+            "Boundary", "role", "in", "lines", "arcs", "length " + lengths.Symbol(), "area inside " + lengths.Symbol(2));
+        var boundaries = input.Section.Outline.Boundaries;
+        for (var i = 0; i < boundaries.Length; i++)
+        {
+            var (boundary, role, parent) = (boundaries[i].Boundary, boundaries[i].Role, boundaries[i].Parent);
+            var arcs = boundary.Edges.Count(e => e is ArcEdge);
+            table.AddRow(
+                TableStyle.Number(i + 1),
+                role.ToString().ToLowerInvariant(),
+                parent < 0 ? "" : TableStyle.Number(parent + 1),
+                TableStyle.Number(boundary.Edges.Length - arcs),
+                TableStyle.Number(arcs),
+                lengths.Of(boundary.Length),
+                lengths.Of(Math.Abs(boundary.SignedArea), 2));
+        }
+
+        return table;
+    }
+
+    private static void Entities(IAnsiConsole console, string title, IReadOnlyList<EntityCount> counts)
+    {
+        if (counts.Count == 0)
+        {
+            return;
+        }
+
+        var table = TableStyle.Columns(title, "layer", "count", "why");
+        foreach (var count in counts)
+        {
+            table.AddRow(new Text(count.Kind), new Text(count.Layer), new Text(TableStyle.Number(count.Count)), new Text(LeftOutWords.Of(count.Reason)));
+        }
+
+        console.Write(table);
+    }
+
+    private static void Notes(IAnsiConsole console, string title, IReadOnlyList<DrawingNote> notes)
+    {
+        if (notes.Count == 0)
+        {
+            return;
+        }
+
+        var table = TableStyle.Columns(title, "");
+        foreach (var note in notes)
+        {
+            table.AddRow(new Text(note.Name), new Text(note.Message));
+        }
+
+        console.Write(table);
+    }
+}

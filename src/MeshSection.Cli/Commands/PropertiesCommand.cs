@@ -33,8 +33,10 @@ internal static class PropertiesCommand
     {
         var input = SectionInput.Read(request);
         var (flat, mesh) = meshRequest.Apply(input.Section, input.Unit);
+        var isConnected = input.Section.Outline.RegionCount == 1;
+        var torsionTask = Task.Run(() => isConnected ? TorsionAnalysis.Of(flat, mesh) : null);
         var properties = PropertiesAnalysis.Of(input.Section, flat, mesh);
-        var torsion = input.Section.Outline.RegionCount == 1 ? TorsionAnalysis.Of(flat, mesh) : null;
+        var torsion = torsionTask.GetAwaiter().GetResult();
         if (output.IsJson)
         {
             terminal.WriteJson(stream => PropertiesJson.Write(stream, properties, torsion, input.Unit));

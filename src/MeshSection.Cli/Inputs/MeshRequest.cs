@@ -21,6 +21,9 @@ internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, doubl
     /// <summary>The largest minimum angle that may be asked for, degrees.</summary>
     public const double LargestMinAngle = 33;
 
+    // Nodes that an outline may need for its own small features, whatever the size of its triangles.
+    private const int LeastNodeLimit = 300_000;
+
     // Refinement halves areas until they fit, so that the mean ends near two thirds of the largest.
     private const double MeanOverLargest = 0.65;
 
@@ -37,7 +40,13 @@ internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, doubl
         var flat = flattening.Apply(outline);
         var area = new BoundaryIntegrator(outline).Moments(outline.Bounds.Centre).Area;
         var settings = new MeshSettings();
-        settings = settings with { MinAngle = MinAngle ?? settings.MinAngle, MaxArea = MaxArea(area, unit) };
+        var maxArea = MaxArea(area, unit);
+        settings = settings with
+        {
+            MinAngle = MinAngle ?? settings.MinAngle,
+            MaxArea = maxArea,
+            MaxNodes = LeastNodeLimit + (int)(2 * area / maxArea),
+        };
         return (flat, new DelaunayMesher().Triangulate(flat.Graph, settings));
     }
 

@@ -135,7 +135,8 @@ internal static class PropertiesTable
         table.AddRow(
             $"{p.CrossChecks.Length} quantities by two methods",
             $"differ by at most {Digits.Small(worst.Difference)} ({worst.Quantity})");
-        table.AddRow("mesh", $"{p.Mesh.Triangles} triangles, smallest angle {Digits.Of(p.Mesh.MinAngle)}°");
+        table.AddRow("mesh", $"{p.Mesh.Triangles} triangles, smallest angle {Digits.Of(p.Mesh.MinAngle)}°" +
+            (p.Mesh.Unrefined == 0 ? "" : $"; {p.Mesh.Unrefined} not refined, see 'meshsection mesh'"));
         table.AddRow(
             "chords of the mesh",
             p.Chords.MaxSag == 0

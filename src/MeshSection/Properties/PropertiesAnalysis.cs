@@ -52,7 +52,8 @@ public static class PropertiesAnalysis
                 (chords.Area - area) / area,
                 (chords.SecondMoment.X - own.X) / own.X,
                 (chords.SecondMoment.Y - own.Y) / own.Y),
-            Mesh = new MeshSummary(mesh.TriangleCount, mesh.Nodes.Length, MeshQuality.Of(mesh).SmallestAngle),
+            Mesh = new MeshSummary(
+                mesh.TriangleCount, mesh.Nodes.Length, MeshQuality.Of(mesh).SmallestAngle, mesh.Unrefined.Length),
         };
 
         PlasticBending Plastic(PlasticAxis axis, double shift, Point direction, double secondMoment)

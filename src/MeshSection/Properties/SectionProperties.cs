@@ -103,7 +103,8 @@ public readonly record struct ChordError(double MaxSag, double Area, double Seco
 /// <param name="Triangles">How many triangles.</param>
 /// <param name="Nodes">How many nodes.</param>
 /// <param name="MinAngle">The smallest angle of any triangle, degrees.</param>
-public readonly record struct MeshSummary(int Triangles, int Nodes, double MinAngle);
+/// <param name="Unrefined">How many triangles could not be given the quality asked for.</param>
+public readonly record struct MeshSummary(int Triangles, int Nodes, double MinAngle, int Unrefined = 0);
 
 /// <summary>
 /// Every area property of a section of one material. Values are those of the curved outline itself (boundary

@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
 using MeshSection.Dxf.Selection;
-using MeshSection.Units;
 using MeshSection.Geometry;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf;
 

@@ -4,8 +4,8 @@ using MeshSection.Dxf.Curves;
 using MeshSection.Dxf.Entities;
 using MeshSection.Dxf.Loops;
 using MeshSection.Dxf.Selection;
-using MeshSection.Units;
 using MeshSection.Geometry;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf;
 

@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
-using MeshSection.Units;
 using MeshSection.Geometry;
 using MeshSection.Materials;
+using MeshSection.Units;
 
 namespace MeshSection.Files;
 

@@ -1,10 +1,10 @@
 using System.Collections.Immutable;
-using MeshSection.Units;
 using MeshSection.Files.Quantities;
 using MeshSection.Files.Shapes;
 using MeshSection.Files.Tree;
 using MeshSection.Geometry;
 using MeshSection.Materials;
+using MeshSection.Units;
 
 namespace MeshSection.Files;
 

@@ -1,5 +1,5 @@
-using MeshSection.Units;
 using MeshSection.Geometry;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Tests;
 

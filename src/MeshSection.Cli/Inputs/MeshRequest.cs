@@ -1,7 +1,7 @@
-using MeshSection.Units;
 using MeshSection.Integration;
 using MeshSection.Meshing;
 using MeshSection.Sections;
+using MeshSection.Units;
 
 namespace MeshSection.Cli.Inputs;
 

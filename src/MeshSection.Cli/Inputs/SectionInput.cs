@@ -1,8 +1,8 @@
 using MeshSection.Dxf;
-using MeshSection.Units;
 using MeshSection.Files;
 using MeshSection.Materials;
 using MeshSection.Sections;
+using MeshSection.Units;
 
 namespace MeshSection.Cli.Inputs;
 

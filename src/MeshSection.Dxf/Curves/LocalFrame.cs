@@ -1,6 +1,6 @@
 using MeshSection.Dxf.Entities;
-using MeshSection.Units;
 using MeshSection.Geometry;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf.Curves;
 

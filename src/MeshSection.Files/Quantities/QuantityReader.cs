@@ -1,6 +1,6 @@
 using System.Globalization;
-using MeshSection.Units;
 using MeshSection.Files.Tree;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Quantities;
 

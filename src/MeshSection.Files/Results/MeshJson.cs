@@ -1,7 +1,7 @@
 using System.Text.Json;
-using MeshSection.Units;
 using MeshSection.Geometry;
 using MeshSection.Meshing;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Results;
 

@@ -1,7 +1,7 @@
 using System.Text.Json;
-using MeshSection.Units;
 using MeshSection.Properties;
 using MeshSection.Torsion;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Results;
 

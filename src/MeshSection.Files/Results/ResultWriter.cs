@@ -1,7 +1,7 @@
 using System.Text.Encodings.Web;
 using System.Text.Json;
-using MeshSection.Units;
 using MeshSection.Geometry;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Results;
 
@@ -44,7 +44,7 @@ internal readonly struct ResultWriter(Utf8JsonWriter json, LengthUnit unit)
     }
 
     /// <summary>A number in mm to a power; 0 for one without unit. A negative zero loses its sign.</summary>
-    public void Number(string key, double value, int power = 0) => 
+    public void Number(string key, double value, int power = 0) =>
         Json.WriteNumber(key, unit.FromMillimetres(value, power) + 0.0);
 
     public void PerLength(string key, double value) => Json.WriteNumber(key, value * unit.Millimetres);

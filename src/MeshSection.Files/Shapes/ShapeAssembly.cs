@@ -1,7 +1,7 @@
 using System.Collections.Immutable;
 using System.Globalization;
-using MeshSection.Units;
 using MeshSection.Geometry;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Shapes;
 

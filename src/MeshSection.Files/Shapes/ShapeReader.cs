@@ -1,10 +1,10 @@
 using System.Collections.Immutable;
 using System.Globalization;
-using MeshSection.Units;
 using MeshSection.Files.Quantities;
 using MeshSection.Files.Tree;
 using MeshSection.Geometry;
 using MeshSection.Sections.Shapes;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Shapes;
 

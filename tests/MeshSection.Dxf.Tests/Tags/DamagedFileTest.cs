@@ -1,5 +1,6 @@
 using System.Text;
 using CsCheck;
+using MeshSection.Units;
 using static MeshSection.Dxf.Tests.DxfText;
 
 namespace MeshSection.Dxf.Tests.Tags;
@@ -168,7 +169,7 @@ public class DamagedFileTest
 
             try
             {
-                DrawingOutliner.Outline(Read([.. changed]), new OutlineOptions { Unit = Dxf.Units.LengthUnit.Millimetre });
+                DrawingOutliner.Outline(Read([.. changed]), new OutlineOptions { Unit = LengthUnit.Millimetre });
             }
             catch (DrawingException e)
             {

@@ -1,9 +1,9 @@
 using System.Text;
 using System.Text.Json.Nodes;
-using MeshSection.Units;
 using MeshSection.Files.Results;
 using MeshSection.Geometry;
 using MeshSection.Meshing;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Tests.Results;
 

@@ -1,10 +1,11 @@
 using System.Globalization;
 using System.Text;
 using System.Text.Json.Nodes;
-using MeshSection.Units;
 using MeshSection.Files.Results;
 using MeshSection.Geometry;
 using MeshSection.Properties;
+using MeshSection.Torsion;
+using MeshSection.Units;
 
 namespace MeshSection.Files.Tests.Results;
 
@@ -225,12 +226,39 @@ public class PropertiesJsonTests
         Assert.DoesNotContain("\r", text, StringComparison.Ordinal);
     }
 
+    [Fact]
+    public void Torsion_and_shear_stand_in_the_unit_shown_and_only_where_they_exist()
+    {
+        var torsion = new TorsionProperties
+        {
+            PoissonRatio = 0.25,
+            Area = 1000,
+            TorsionConstant = new TorsionConstant(2 * Math.Pow(25.4, 4), 4 * Math.Pow(25.4, 4)),
+            TrefftzShearCentre = new Point(25.4, -50.8),
+            ElasticShearCentre = new Point(1, 1),
+            WarpingConstant = 7 * Math.Pow(25.4, 6),
+            ShearFlexibility = new ShearFlexibility(1 / (25.4 * 25.4), 0.5 / (25.4 * 25.4), 0),
+            OutlineDeviation = 0,
+        };
+        var document = JsonNode.Parse(Text(LengthUnit.Inch, Properties, torsion))!;
+        Assert.Equal(3, (double)document["torsionConstant"]!["value"]!, 12);
+        Assert.Equal(2, (double)document["torsionConstant"]!["lower"]!, 12);
+        Assert.Equal(4, (double)document["torsionConstant"]!["upper"]!, 12);
+        Assert.Equal(1, (double)document["shearCentre"]!["x"]!, 12);
+        Assert.Equal(-2, (double)document["shearCentre"]!["y"]!, 12);
+        Assert.Equal(7, (double)document["warpingConstant"]!, 12);
+        Assert.Equal(1, (double)document["shearArea"]!["x"]!, 12);
+        Assert.Equal(2, (double)document["shearArea"]!["y"]!, 12);
+        Assert.Equal(0.25, (double)document["shearArea"]!["poissonRatio"]!);
+        Assert.DoesNotContain("torsion", Text(LengthUnit.Inch, Properties), StringComparison.Ordinal);
+    }
+
     private static ExtremeFibre Fibre(double distance, double x, double y, double modulus) => new(distance, new Point(x, y), modulus);
 
-    private static string Text(LengthUnit unit, SectionProperties properties)
+    private static string Text(LengthUnit unit, SectionProperties properties, TorsionProperties? torsion = null)
     {
         using var stream = new MemoryStream();
-        PropertiesJson.Write(stream, properties, unit);
+        PropertiesJson.Write(stream, properties, torsion, unit);
         Assert.True(stream.CanWrite);
         return Encoding.UTF8.GetString(stream.ToArray());
     }

@@ -1,5 +1,4 @@
 using MeshSection.Units;
-using static MeshSection.Dxf.Tests.DxfText;
 
 namespace MeshSection.Tests.Units;
 
@@ -51,26 +50,4 @@ public class LengthUnitTests
     }
 
     // The table of $INSUNITS in the DXF reference, group codes of the header section.
-    [Theory]
-    [InlineData(1, "in")]
-    [InlineData(2, "ft")]
-    [InlineData(4, "mm")]
-    [InlineData(5, "cm")]
-    [InlineData(6, "m")]
-    [InlineData(9, "mil")]
-    [InlineData(10, "yd")]
-    [InlineData(13, "µm")]
-    [InlineData(14, "dm")]
-    [InlineData(20, "pc")]
-    [InlineData(24, "miUS")]
-    public void The_drawing_s_code_gives_its_unit(int code, string symbol) =>
-        Assert.Equal(symbol, Read(Drawing([Square(0, 0, 1)], unit: code)).Unit?.Symbol);
-
-    [Fact]
-    public void A_code_that_the_format_does_not_know_is_no_unit_and_noted()
-    {
-        var drawing = Read(Drawing([Square(0, 0, 1)], unit: 77));
-        Assert.Null(drawing.Unit);
-        Assert.Contains(drawing.Notes, n => n.Code == NoteCode.UnitCodeUnknown && n.Message.Contains("77", StringComparison.Ordinal));
-    }
 }

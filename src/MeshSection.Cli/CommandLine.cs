@@ -1,5 +1,6 @@
 using System.CommandLine;
 using MeshSection.Cli.Commands;
+using MeshSection.Files;
 
 namespace MeshSection.Cli;
 
@@ -26,9 +27,7 @@ internal static class CommandLine
         {
             if (parsed.Errors.Count > 0 && !IsHelpAsked(args))
             {
-                throw new CommandException(
-                    string.Join(Environment.NewLine, parsed.Errors.Select(e => e.Message)) + Environment.NewLine +
-                    $"See 'meshsection {CommandPath(parsed)}--help'.");
+                throw new CommandException(Fault(parsed));
             }
 
             return parsed.Invoke(new InvocationConfiguration
@@ -62,8 +61,23 @@ internal static class CommandLine
         return root;
     }
 
-    private static bool IsHelpAsked(IReadOnlyList<string> args) => args.Any(a => a is "-h" or "--help" or "-?");
+    private static string Fault(ParseResult parsed)
+    {
+        var command = parsed.CommandResult.Command;
+        var path = command is RootCommand ? "" : command.Name + " ";
+        var see = $"See 'meshsection {path}--help'.";
+        if (parsed.UnmatchedTokens is not [var word, ..])
+        {
+            return string.Join(Environment.NewLine, parsed.Errors.Select(e => e.Message)) + Environment.NewLine + see;
+        }
 
-    private static string CommandPath(ParseResult parsed) =>
-        parsed.CommandResult.Command is RootCommand ? "" : parsed.CommandResult.Command.Name + " ";
+        // What was not understood is the cause; what is then missing follows from it.
+        string[] known = [.. command.Subcommands.Select(c => c.Name), .. command.Options.Select(o => o.Name)];
+        var isOption = word.StartsWith('-');
+        return !isOption && path.Length > 0
+            ? $"'{word}' is one word too many: a command reads one input. {see}"
+            : $"'{word}' is no {(isOption ? "option" : "command")} here. {NearestWord.Advice(word, known)} {see}";
+    }
+
+    private static bool IsHelpAsked(IReadOnlyList<string> args) => args.Any(a => a is "-h" or "--help" or "-?");
 }

@@ -34,9 +34,14 @@ internal static class Help
 
         public override int Invoke(ParseResult parseResult)
         {
-            help.Invoke(parseResult);
-            var command = parseResult.CommandResult.Command;
+            // The help calls the command by the name of its assembly, which is not the one that it is run by.
             var output = parseResult.InvocationConfiguration.Output;
+            using var text = new StringWriter();
+            parseResult.InvocationConfiguration.Output = text;
+            help.Invoke(parseResult);
+            parseResult.InvocationConfiguration.Output = output;
+            output.Write(text.ToString().Replace(RootCommand.ExecutableName, "meshsection", StringComparison.Ordinal));
+            var command = parseResult.CommandResult.Command;
             output.WriteLine("Examples:");
             foreach (var (name, line, meaning) in Examples)
             {

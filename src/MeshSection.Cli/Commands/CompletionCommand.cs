@@ -43,7 +43,7 @@ internal static class CompletionCommand
 
     public static Command Create(Terminal terminal)
     {
-        var shell = new Argument<string>("SHELL") { Description = "bash, zsh, fish or powershell" };
+        var shell = new Argument<string>("SHELL") { Description = "bash, zsh, fish or powershell", HelpName = "SHELL" };
         shell.AcceptOnlyFromAmong("bash", "zsh", "fish", "powershell");
         var command = new Command("completion", "Print a script that makes a shell complete this command.") { shell };
         command.SetAction(parsed => terminal.Output.WriteLine(parsed.GetRequiredValue(shell) switch

@@ -9,6 +9,7 @@ internal sealed class InputOptions
     private readonly Argument<string> _input = new("INPUT")
     {
         Description = "A drawing (.dxf) or a section file (.json)",
+        HelpName = "INPUT",
     };
 
     private readonly Option<string?> _unit = new("--unit")

@@ -1,10 +1,15 @@
-namespace MeshSection.Files.Tree;
+namespace MeshSection.Files;
 
 /// <summary>Guesses which of the known words was meant.</summary>
-internal static class NearestWord
+public static class NearestWord
 {
-    /// <summary>The known word that takes the fewest changes of a letter, if they are few for its length; else null.</summary>
-    public static string? Find(string word, IEnumerable<string> known)
+    /// <summary>
+    /// The known word that takes the fewest changes of a letter, if they are few for its length, or else the first that
+    /// begins with what was written; null if there is neither.
+    /// </summary>
+    /// <param name="word">What was written.</param>
+    /// <param name="known">The words that would have been right.</param>
+    public static string? Find(string word, IReadOnlyCollection<string> known)
     {
         var (nearest, least) = ((string?)null, int.MaxValue);
         foreach (var candidate in known)
@@ -16,10 +21,14 @@ internal static class NearestWord
             }
         }
 
-        return nearest is not null && least <= (nearest.Length + 1) / 3 ? nearest : null;
+        return nearest is not null && least <= (nearest.Length + 1) / 3
+            ? nearest
+            : known.FirstOrDefault(k => word.Length > 2 && k.StartsWith(word, StringComparison.OrdinalIgnoreCase));
     }
 
     /// <summary>"Did you mean …?", or all that is known.</summary>
+    /// <param name="word">What was written.</param>
+    /// <param name="known">The words that would have been right.</param>
     public static string Advice(string word, IReadOnlyCollection<string> known) =>
         Find(word, known) is { } nearest ? $"Did you mean \"{nearest}\"?" : $"Known here: {string.Join(", ", known)}.";
 

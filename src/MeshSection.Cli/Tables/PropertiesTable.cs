@@ -16,8 +16,10 @@ internal static class PropertiesTable
         Heading.Write(console, input);
         console.Write(Size(p, lengths, size));
         console.Write(SecondMoments(p, lengths));
-        console.Write(Elastic(p, lengths, size));
+        console.Write(Radii(p, lengths));
+        ElasticTable.Write(console, p, lengths, size);
         console.Write(Plastic(p, lengths, size));
+        console.WriteLine("  Neutral axes along 1 and 2 are measured from the centroid.");
         console.Write(TorsionRows(torsion, input.Section.Outline.RegionCount, lengths, size));
         console.Write(Member(p));
         console.Write(Checks(p, lengths));
@@ -25,7 +27,7 @@ internal static class PropertiesTable
 
     private static Table Size(SectionProperties p, Lengths lengths, double size)
     {
-        var table = TableStyle.Columns("Section", "", "");
+        var table = TableStyle.Columns("Section", "", "").KeepWhole(1);
         table.AddRow("area A", lengths.Of(p.Area, 2), lengths.Symbol(2));
         table.AddRow("perimeter, outer", lengths.Of(p.OuterPerimeter), lengths.Symbol());
         table.AddRow("perimeter, inner", lengths.Of(p.InnerPerimeter), lengths.Symbol());
@@ -38,7 +40,7 @@ internal static class PropertiesTable
 
     private static Table SecondMoments(SectionProperties p, Lengths lengths)
     {
-        var table = TableStyle.Columns("Second moments, " + lengths.Symbol(4), "centroid", "datum");
+        var table = TableStyle.Columns("Second moments, " + lengths.Symbol(4), "centroid", "datum").KeepWhole(1, 2);
         var (own, datum) = (p.SecondMoment, p.SecondMomentDatum);
         table.AddRow("Ix", lengths.Of(own.X, 4), lengths.Of(datum.X, 4));
         table.AddRow("Iy", lengths.Of(own.Y, 4), lengths.Of(datum.Y, 4));
@@ -47,59 +49,38 @@ internal static class PropertiesTable
         table.AddRow("I1, major", lengths.Of(p.Principal.I1, 4));
         table.AddRow("I2, minor", lengths.Of(p.Principal.I2, 4));
         table.AddRow("angle x to 1", Digits.Near(p.Principal.Angle, 1) + "°");
-        table.AddRow("r x, y", $"{lengths.Of(p.RadiusOfGyration.X)}, {lengths.Of(p.RadiusOfGyration.Y)} {lengths.Symbol()}");
-        table.AddRow("r 1, 2", $"{lengths.Of(p.RadiusOfGyration1)}, {lengths.Of(p.RadiusOfGyration2)} {lengths.Symbol()}");
         return table;
 
         // A product moment that is nothing beside the other two is rounding.
         string Product(SecondMoments m) => Math.Abs(m.XY) < 1e-12 * m.Polar ? "0" : lengths.Of(m.XY, 4);
     }
 
-    private static Table Elastic(SectionProperties p, Lengths lengths, double size)
+    private static Table Radii(SectionProperties p, Lengths lengths)
     {
-        var table = TableStyle.Columns("Elastic moduli", "side", "modulus " + lengths.Symbol(3), "", "distance " + lengths.Symbol(), "at (x, y)");
-        Add("about x", "top", "bottom", p.ElasticX);
-        Add("about y", "right", "left", p.ElasticY);
-        Add("about 1", "+2", "-2", p.Elastic1);
-        Add("about 2", "+1", "-1", p.Elastic2);
-        table.Caption("Each side of an axis has a modulus of its own; the smaller governs.");
+        var table = TableStyle.Columns("Radii of gyration, " + lengths.Symbol(), "").KeepWhole(1);
+        table.AddRow("about x", lengths.Of(p.RadiusOfGyration.X));
+        table.AddRow("about y", lengths.Of(p.RadiusOfGyration.Y));
+        table.AddRow("about 1", lengths.Of(p.RadiusOfGyration1));
+        table.AddRow("about 2", lengths.Of(p.RadiusOfGyration2));
         return table;
-
-        void Add(string axis, string positive, string negative, ExtremeFibres fibres)
-        {
-            Side(axis, positive, fibres.Positive);
-            Side("", negative, fibres.Negative);
-
-            void Side(string name, string side, ExtremeFibre fibre) => table.AddRow(
-                name,
-                side,
-                lengths.Of(fibre.Modulus, 3),
-                Verdict(fibres, fibre),
-                lengths.Of(fibre.Distance),
-                lengths.Of(fibre.Point, size));
-        }
-    }
-
-    private static string Verdict(ExtremeFibres fibres, ExtremeFibre fibre)
-    {
-        var isEqual = Math.Abs(fibres.Positive.Modulus - fibres.Negative.Modulus) <= 1e-9 * fibre.Modulus;
-        return isEqual ? "both equal" : fibre == fibres.Governing ? "◄ governs" : "";
     }
 
     private static Table Plastic(SectionProperties p, Lengths lengths, double size)
     {
-        var table = TableStyle.Columns("Plastic moduli", "neutral axis, " + lengths.Symbol(), "modulus " + lengths.Symbol(3), "shape factor");
-        Add("about x", "at y = ", p.PlasticX);
-        Add("about y", "at x = ", p.PlasticY);
-        Add("about 1", "centroid along 2 ", p.Plastic1);
-        Add("about 2", "centroid along 1 ", p.Plastic2);
+        var table = TableStyle
+            .Columns("Plastic moduli, " + lengths.Symbol(3), "", "shape factor", "neutral axis, " + lengths.Symbol())
+            .KeepWhole(1, 2);
+        Add("about x", "y = ", p.PlasticX);
+        Add("about y", "x = ", p.PlasticY);
+        Add("about 1", "along 2: ", p.Plastic1);
+        Add("about 2", "along 1: ", p.Plastic2);
         return table;
 
         void Add(string axis, string place, PlasticBending bending) => table.AddRow(
             axis,
-            place + lengths.Coordinate(bending.NeutralAxis, size),
             lengths.Of(bending.Modulus, 3),
-            Digits.Of(bending.ShapeFactor));
+            Digits.Of(bending.ShapeFactor),
+            place + lengths.Coordinate(bending.NeutralAxis, size));
     }
 
     private static Table TorsionRows(TorsionProperties? t, int pieces, Lengths lengths, double size)
@@ -114,7 +95,15 @@ internal static class PropertiesTable
         var j = t.TorsionConstant;
         table.AddRow("torsion constant J", $"{lengths.Of(j.Value, 4)} {lengths.Symbol(4)}");
         table.AddRow("proven bounds of J", $"{lengths.Of(j.Lower, 4)} to {lengths.Of(j.Upper, 4)}, {Digits.Small(j.Gap)} apart");
-        table.AddRow("shear centre", lengths.Of(t.ShearCentre, size));
+        if (t.OutlineDeviation > 0)
+        {
+            table.AddRow(
+                "not proven for all",
+                $"some curves keep chords up to {lengths.Of(t.OutlineDeviation)} {lengths.Symbol()} off: give a finer --sag");
+        }
+
+        // Nearer to an axis than the bounds of J could tell is on it.
+        table.AddRow("shear centre", lengths.Of(t.ShearCentre, Math.Max(1, 1e6 * j.Gap) * size));
         table.AddRow("warping constant", $"{lengths.Of(t.WarpingConstant, 6)} {lengths.Symbol(6)}");
         table.AddRow("shear area x, y", $"{lengths.Of(t.ShearAreaX, 2)}, {lengths.Of(t.ShearAreaY, 2)} {lengths.Symbol(2)} (nu = {Digits.Of(t.PoissonRatio)})");
         return table;
@@ -122,7 +111,7 @@ internal static class PropertiesTable
 
     private static Table Member(SectionProperties p)
     {
-        var table = TableStyle.Columns("Member", "", "");
+        var table = TableStyle.Columns("Member", "", "").KeepWhole(2);
         table.AddRow("mass", p.MassPerLength is { } mass ? Digits.Of(1000 * mass) : "no density given", p.MassPerLength is null ? "" : "kg/m");
         table.AddRow("surface to paint, outside", Digits.Of(p.OuterPerimeter / 1000), "m²/m");
         return table;

@@ -21,6 +21,19 @@ internal static class TableStyle
         return table;
     }
 
+    /// <summary>Keeps the cells of some columns in one piece, however narrow the terminal: a broken number misleads.</summary>
+    /// <param name="table">The table.</param>
+    /// <param name="columns">Indices of the columns.</param>
+    public static Table KeepWhole(this Table table, params ReadOnlySpan<int> columns)
+    {
+        foreach (var column in columns)
+        {
+            table.Columns[column].NoWrap = true;
+        }
+
+        return table;
+    }
+
     /// <summary>A whole number.</summary>
     public static string Number(int value) => value.ToString(CultureInfo.InvariantCulture);
 }

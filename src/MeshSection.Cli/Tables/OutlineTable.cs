@@ -22,8 +22,8 @@ internal static class OutlineTable
         console.Write(Boundaries(input, lengths));
         if (input.Drawing is { Report: var report })
         {
-            Entities(console, "Used", report.Used);
-            Entities(console, "Left out", report.LeftOut);
+            Entities(console, "Used", report.Used, isReasoned: false);
+            Entities(console, "Left out", report.LeftOut, isReasoned: true);
             Notes(console, "Repaired", report.Repairs);
             Notes(console, "Cautions", report.Cautions);
         }
@@ -64,17 +64,26 @@ internal static class OutlineTable
         return table;
     }
 
-    private static void Entities(IAnsiConsole console, string title, IReadOnlyList<EntityCount> counts)
+    private static void Entities(IAnsiConsole console, string title, IReadOnlyList<EntityCount> counts, bool isReasoned)
     {
         if (counts.Count == 0)
         {
             return;
         }
 
-        var table = TableStyle.Columns(title, "layer", "count", "why");
+        var table = isReasoned
+            ? TableStyle.Columns(title, "layer", "count", "why")
+            : TableStyle.Columns(title, "layer", "count");
         foreach (var count in counts)
         {
-            table.AddRow(new Text(count.Kind), new Text(count.Layer), new Text(TableStyle.Number(count.Count)), new Text(LeftOutWords.Of(count.Reason)));
+            // As text, not as markup: a layer may have any name.
+            List<Text> cells = [new(count.Kind), new(count.Layer), new(TableStyle.Number(count.Count))];
+            if (isReasoned)
+            {
+                cells.Add(new Text(LeftOutWords.Of(count.Reason)));
+            }
+
+            table.AddRow(cells);
         }
 
         console.Write(table);

@@ -18,8 +18,7 @@ internal static class PropertiesTable
         console.Write(SecondMoments(p, lengths));
         console.Write(Radii(p, lengths));
         ElasticTable.Write(console, p, lengths, size);
-        console.Write(Plastic(p, lengths, size));
-        console.WriteLine("  Neutral axes along 1 and 2 are measured from the centroid.");
+        Plastic(console, p, lengths, size);
         console.Write(TorsionRows(torsion, input.Section.Outline.RegionCount, lengths, size));
         console.Write(Member(p));
         console.Write(Checks(p, lengths));
@@ -65,22 +64,22 @@ internal static class PropertiesTable
         return table;
     }
 
-    private static Table Plastic(SectionProperties p, Lengths lengths, double size)
+    private static void Plastic(IAnsiConsole console, SectionProperties p, Lengths lengths, double size)
     {
-        var table = TableStyle
-            .Columns("Plastic moduli, " + lengths.Symbol(3), "", "shape factor", "neutral axis, " + lengths.Symbol())
-            .KeepWhole(1, 2);
+        var table = TableStyle.Columns("Plastic moduli, " + lengths.Symbol(3), "", "shape factor").KeepWhole(1, 2);
+        var axes = TableStyle.Columns("Plastic neutral axes, " + lengths.Symbol(), "");
         Add("about x", "y = ", p.PlasticX);
         Add("about y", "x = ", p.PlasticY);
-        Add("about 1", "along 2: ", p.Plastic1);
-        Add("about 2", "along 1: ", p.Plastic2);
-        return table;
+        Add("about 1", "along 2 from the centroid: ", p.Plastic1);
+        Add("about 2", "along 1 from the centroid: ", p.Plastic2);
+        console.Write(table);
+        console.Write(axes);
 
-        void Add(string axis, string place, PlasticBending bending) => table.AddRow(
-            axis,
-            lengths.Of(bending.Modulus, 3),
-            Digits.Of(bending.ShapeFactor),
-            place + lengths.Coordinate(bending.NeutralAxis, size));
+        void Add(string axis, string place, PlasticBending bending)
+        {
+            table.AddRow(axis, lengths.Of(bending.Modulus, 3), Digits.Of(bending.ShapeFactor));
+            axes.AddRow(axis, place + lengths.Coordinate(bending.NeutralAxis, size));
+        }
     }
 
     private static Table TorsionRows(TorsionProperties? t, int pieces, Lengths lengths, double size)

@@ -9,12 +9,13 @@ internal static class Help
 {
     private static readonly (string Command, string Line, string Meaning)[] Examples =
     [
-        ("properties", "meshsection properties dxf-samples/handrail.dxf --out handrail.png", "every property, and a picture"),
-        ("properties", "meshsection properties plate.dxf --unit mm --density \"2700 kg/m3\"", "a drawing that does not say its unit; mass per length"),
-        ("properties", "meshsection properties tee.json --json", "for other programs"),
-        ("outline", "meshsection outline sheet.dxf --layer \"SECTION*\" --tolerance 0.05", "only some layers; ends up to 0.05 apart are joined"),
-        ("mesh", "meshsection mesh frame.dxf --elements 5000 --out frame-mesh.png", "about 5000 triangles"),
-        ("mesh", "meshsection mesh frame.dxf --element-size 2mm --min-angle 30", "edges of about 2 mm"),
+        ("properties", "meshsection properties dxf-samples/handrail-channel.dxf --out handrail-channel.png", "every property, and a picture"),
+        ("properties", "meshsection properties dxf-samples/eaves-angle.dxf --density \"7850 kg/m3\"", "with the mass per length"),
+        ("properties", "meshsection properties docs/examples/lock-gate-rail.json --json", "a section file; for other programs"),
+        ("outline", "meshsection outline dxf-samples/gate-post.dxf --layer SECTION --tolerance \"0.05 mm\"", "one layer only; ends up to 0.05 mm apart are joined"),
+        ("outline", "meshsection outline dxf-samples/runway-tee.dxf --unit in", "a drawing that does not say its unit, or says it wrongly"),
+        ("mesh", "meshsection mesh dxf-samples/pontoon-deck.dxf --elements 5000 --out pontoon-mesh.png", "about 5000 triangles"),
+        ("mesh", "meshsection mesh dxf-samples/winch-shaft.dxf --element-size 2mm --min-angle 30", "sides of at most about 2 mm"),
         ("completion", "source <(meshsection completion bash)", "completion in this shell"),
     ];
 

@@ -11,7 +11,7 @@ public class BadInputTests
         ["empty"] = ("", ["empty"]),
         ["no dxf"] = ("Dear Sir,\nplease find attached\n", ["line 1", "Dear Sir,"]),
         ["cut off"] = (DxfText.Drawing(Square)[..^40], ["cut off"]),
-        ["group code"] = (DxfText.Drawing(Square).Replace("\n90\n", "\nninety\n", StringComparison.Ordinal), ["Line 19", "ninety"]),
+        ["group code"] = (DxfText.Drawing(Square).Replace("\n90\n", "\nninety\n", StringComparison.Ordinal), ["Line 21", "ninety"]),
         ["not a number"] = (DxfText.Drawing(DxfText.Line(0, 0, 1, 0)).Replace("\n21\n0\n", "\n21\nNaN\n", StringComparison.Ordinal), ["group 21", "LINE #A1", "FRAME", "NaN"]),
         ["infinite"] = (DxfText.Drawing(DxfText.Line(0, 0, 1, 0)).Replace("\n21\n0\n", "\n21\n1e400\n", StringComparison.Ordinal), ["group 21", "LINE #A1", "1e400"]),
         ["decimal comma"] = (DxfText.Drawing(DxfText.Line(0, 0, 1, 0)).Replace("\n21\n0\n", "\n21\n0,5\n", StringComparison.Ordinal), ["0,5", "decimal point"]),

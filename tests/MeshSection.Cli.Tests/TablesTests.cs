@@ -71,7 +71,7 @@ public class TablesTests
     [Theory]
     [InlineData("[suggest:16]", "meshsection prop", "properties")]
     [InlineData("[suggest:30]", "meshsection properties x --uni", "--unit")]
-    [InlineData("[suggest:22]", "meshsection completion", "completion")]
+    [InlineData("[suggest:24]", "meshsection completion f", "fish")]
     public void A_shell_completes_commands_and_options(string directive, string typed, string expected) =>
         Assert.Contains(expected, CommandRun.Of(directive, typed).Output.Split('\n', '\r'));
 

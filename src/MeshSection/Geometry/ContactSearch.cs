@@ -85,7 +85,9 @@ internal sealed class ContactSearch(ImmutableArray<Boundary> loops, double toler
     {
         if (first.Boundary == second.Boundary)
         {
-            return contact.Crosses ? OutlineFault.SelfCrossing : OutlineFault.SelfTouching;
+            return contact.Crosses ? OutlineFault.SelfCrossing
+                : OutlineCheck.HasNoArea(loops[first.Boundary]) ? OutlineFault.NoArea
+                : OutlineFault.SelfTouching;
         }
 
         var (a, b) = (loops[first.Boundary], loops[second.Boundary]);

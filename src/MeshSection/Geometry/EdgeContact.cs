@@ -7,11 +7,15 @@ internal readonly record struct Contact(Point Point, bool Crosses);
 
 /// <summary>
 /// Finds where two edges come nearer than a tolerance. An edge lies within its sag of its chord, so two edges whose
-/// chords are farther apart than that are clear; otherwise the one with the greater sag is halved, until both are as
-/// good as straight. Works for every kind of edge.
+/// chords are farther apart than that are clear; otherwise the one with the greater sag is halved, until both are
+/// as good as straight. Works for every kind of edge.
 /// </summary>
 internal static class EdgeContact
 {
+    // Near the middle but not in it: curves often cross others in their middle, and a crossing at the end of a piece
+    // looks like a touch.
+    private const double Split = 0.4871;
+
     /// <summary>The first place found where the edges cross or come nearer than the tolerance, or null.</summary>
     public static Contact? Find(Edge a, Edge b, double tolerance)
     {
@@ -28,8 +32,8 @@ internal static class EdgeContact
         }
 
         return sagA >= sagB
-            ? Find(a.Part(0, 0.5), b, tolerance) ?? Find(a.Part(0.5, 1), b, tolerance)
-            : Find(a, b.Part(0, 0.5), tolerance) ?? Find(a, b.Part(0.5, 1), tolerance);
+            ? Find(a.Part(0, Split), b, tolerance) ?? Find(a.Part(Split, 1), b, tolerance)
+            : Find(a, b.Part(0, Split), tolerance) ?? Find(a, b.Part(Split, 1), tolerance);
     }
 
     private static Contact? OfChords(Edge a, Edge b, double tolerance)

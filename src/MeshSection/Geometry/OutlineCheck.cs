@@ -21,7 +21,6 @@ internal static class OutlineCheck
 
         CheckNumbers(loops, origin);
         var size = loops.Aggregate(Box.Empty, (box, b) => box.With(b.Bounds)).Diagonal;
-        CheckAreas(loops, size, origin);
         new ContactSearch(loops, TouchRatio * size, origin).Run();
     }
 
@@ -45,17 +44,7 @@ internal static class OutlineCheck
         }
     }
 
-    private static void CheckAreas(ImmutableArray<Boundary> loops, double size, Point origin)
-    {
-        for (var b = 0; b < loops.Length; b++)
-        {
-            // Relative to the loop's own box on both sides, so that a thin plate is not taken for nothing.
-            var scale = loops[b].Length * Math.Max(loops[b].Bounds.Diagonal, AreaRatio * size);
-            if (Math.Abs(loops[b].SignedArea) <= AreaRatio * scale)
-            {
-                throw new OutlineException(
-                    OutlineFault.NoArea, origin + loops[b].Edges[0].Start, new EdgePlace(b, 0));
-            }
-        }
-    }
+    /// <summary>True if a boundary encloses nothing, beside what its own box could hold.</summary>
+    public static bool HasNoArea(Boundary loop) =>
+        Math.Abs(loop.SignedArea) <= AreaRatio * loop.Length * loop.Bounds.Diagonal;
 }

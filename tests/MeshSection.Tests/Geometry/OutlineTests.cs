@@ -74,6 +74,15 @@ public class OutlineTests
     }
 
     [Fact]
+    public void A_crossing_is_named_even_where_the_areas_cancel_or_arcs_are_cut_in_their_middle()
+    {
+        var bowTie = Boundary.Polygon(new Point(0, 0), new Point(10, 10), new Point(10, 0), new Point(0, 10));
+        Assert.Equal((OutlineFault.SelfCrossing, new Point(5, 5)), (Refused(bowTie).Fault, Refused(bowTie).Point));
+        var circle = Boundary.Circle(new Point(0, 5), 2);
+        Assert.Equal(OutlineFault.Crossing, Refused(Rectangle(0, 0, 10, 10), circle).Fault);
+    }
+
+    [Fact]
     public void An_arc_that_cuts_its_neighbours_neighbour_crosses()
     {
         var fault = Refused(Boundary.Create(

@@ -3,7 +3,7 @@ namespace MeshSection.Geometry;
 /// <summary>
 /// Moments of the region between an arc and its chord (a circular segment), in axes of its own: u along the chord from
 /// its middle, v away from it towards the arc. With c half the chord, α half the sweep, s = sin α, k = cos α and
-/// g = α - s k (Young and Budynas, Table A.1, moved from the centre to the chord):
+/// g = α - s k ([YoungBudynas2002], moved from the centre to the chord):
 /// <code>
 /// area    c² g / s²                                first  ∫ v   c³ (2/3 s³ - k g) / s³
 /// along   ∫ u²  c⁴ (g/4 - k s³/6) / s⁴             across ∫ v²  c⁴ ((1/4 + k²) g - 5/6 k s³) / s⁴

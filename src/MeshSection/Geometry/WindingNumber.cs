@@ -6,7 +6,7 @@ internal static class WindingNumber
     /// <summary>The winding number of a loop about a point that does not lie on it.</summary>
     public static int Of(Boundary loop, Point p)
     {
-        // Crossings of the ray from p to the right, upward ones counted +1 and downward ones -1 (Sunday 2001). Pieces
+        // Crossings of the ray from p to the right, upward ones counted +1 and downward ones -1 [Sunday2001]. Pieces
         // that rise or fall steadily cross it at most once; the half-open rule counts a shared end once.
         var winding = 0;
         foreach (var edge in loop.Edges)

@@ -10,7 +10,7 @@ namespace MeshSection.Integration;
 /// </summary>
 internal static class CapQuadrature
 {
-    // Gauss-Legendre, 10 points on (0, 1): abscissa and weight of the upper half (Abramowitz and Stegun, Table 25.4).
+    // Gauss-Legendre, 10 points on (0, 1): abscissa and weight of the upper half [AbramowitzStegun1964].
     private static readonly double[] Abscissae =
     [
         0.1488743389816312, 0.4333953941292472, 0.6794095682990244, 0.8650633666889845, 0.9739065285171717,

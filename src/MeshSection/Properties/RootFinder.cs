@@ -7,7 +7,7 @@ internal static class RootFinder
     private const int MaxSteps = 200;
 
     /// <summary>
-    /// Chandrupatla's method (Advances in Engineering Software 28(3), 1997): inverse quadratic steps where they are
+    /// Chandrupatla's method [Chandrupatla1997]: inverse quadratic steps where they are
     /// safe, bisection where they are not.
     /// </summary>
     /// <param name="f">The function.</param>

@@ -115,10 +115,10 @@ public sealed record SectionProperties
     /// <summary>Area A, mm².</summary>
     public required double Area { get; init; }
 
-    /// <summary>Length of the outer boundaries and islands, mm.</summary>
+    /// <summary>Length of the outer boundaries, mm.</summary>
     public required double OuterPerimeter { get; init; }
 
-    /// <summary>Length of the holes' boundaries, mm; 0 without holes.</summary>
+    /// <summary>Length of the boundaries inside: holes and the islands in them, mm; 0 without holes.</summary>
     public required double InnerPerimeter { get; init; }
 
     /// <summary>Length of all boundaries, mm.</summary>

@@ -41,7 +41,7 @@ internal sealed class TriangleRule
 
     private static TriangleRule Folded()
     {
-        // Five points on (0, 1) (Abramowitz and Stegun, Table 25.4).
+        // Five points on (0, 1) [AbramowitzStegun1964].
         ReadOnlySpan<double> t = [0.0469100770306680, 0.2307653449471585, 0.5, 0.7692346550528415, 0.9530899229693320];
         ReadOnlySpan<double> w = [0.1184634425280945, 0.2393143352496832, 0.2844444444444444, 0.2393143352496832, 0.1184634425280945];
         var (xi, eta, weights) = (new double[25], new double[25], new double[25]);

@@ -39,7 +39,7 @@ public class LetterTests
     [InlineData("φ")]
     public void Letters_are_drawn_from_the_embedded_face_whatever_family_is_asked_for(string text)
     {
-        using var face = SKTypeface.FromFile(FontFile());
+        using var face = SKTypeface.FromFile(RepositoryRoot.PathOf("src/MeshSection.Plots/Fonts/DejaVuSans.ttf"));
         using var font = Typefaces.Font(face, 60);
         using var paint = new SKPaint { Color = SKColors.Black, IsAntialias = true };
         var expected = Pixels(canvas => canvas.DrawText(text, 20, 20 - font.Metrics.Ascent, font, paint));
@@ -57,10 +57,6 @@ public class LetterTests
         Assert.Equal(Typefaces.Width("I = 12 345 mm⁴", 40, true), size.Width, 3);
         Assert.InRange(size.Height, 40, 60);
     }
-
-    // Beside the tests only because the project that embeds it lies in the same tree.
-    private static string FontFile([System.Runtime.CompilerServices.CallerFilePath] string here = "") => System.IO.Path.Combine(
-        System.IO.Path.GetDirectoryName(here)!, "..", "..", "src", "MeshSection.Plots", "Fonts", "DejaVuSans.ttf");
 
     private static void Draw(SKCanvas canvas, string text, string family)
     {

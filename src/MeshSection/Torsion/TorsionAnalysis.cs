@@ -54,11 +54,13 @@ public static class TorsionAnalysis
         var elastic = new Point(
             forY.X * integrals.Moment1 + forY.Y * integrals.Moment2,
             -forX.X * integrals.Moment1 - forX.Y * integrals.Moment2);
+        // Where the bounds meet, rounding may put them in the wrong order.
+        var bounds = new TorsionConstant(Math.Min(lower, integrals.Torsion), Math.Max(lower, integrals.Torsion));
         return new TorsionProperties
         {
             PoissonRatio = poissonRatio,
             Area = area,
-            TorsionConstant = new TorsionConstant(lower, integrals.Torsion),
+            TorsionConstant = bounds,
             TrefftzShearCentre = flat.Outline.Origin + centroid + pole,
             ElasticShearCentre = flat.Outline.Origin + centroid + elastic,
             WarpingConstant = integrals.WarpingSquare - pole.Y * xw + pole.X * yw,

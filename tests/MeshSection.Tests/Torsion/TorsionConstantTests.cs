@@ -37,6 +37,15 @@ public class TorsionConstantTests
     public void The_gap_is_small_at_some_800_triangles(string name, double gap) =>
         Assert.InRange(TorsionPipeline.Of(Solids.Named(name).Boundaries, 400).TorsionConstant.Gap, 0, gap);
 
+    [Fact]
+    public void Bounds_that_meet_in_their_last_digits_keep_their_order()
+    {
+        // A ring so thin that both fields are exact but for rounding, which puts the upper bound below the lower.
+        var j = TorsionPipeline.Of(new Tube(200, 0.05).Boundaries(), 300).TorsionConstant;
+        Assert.True(j.Lower <= j.Value && j.Value <= j.Upper, $"{j}");
+        Assert.InRange(j.Gap, 0, 1e-11);
+    }
+
     [Theory]
     [InlineData("square")]
     [InlineData("equilateral triangle")]

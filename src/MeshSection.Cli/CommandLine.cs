@@ -22,7 +22,8 @@ internal static class CommandLine
     public static int Run(IReadOnlyList<string> args, Terminal terminal)
     {
         var root = Root(terminal);
-        var parsed = root.Parse(args);
+        // A word that begins with @ is a file's name like any other.
+        var parsed = root.Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
         try
         {
             if (parsed.Errors.Count > 0 && !IsHelpAsked(args))

@@ -64,6 +64,10 @@ public class BadInputTests
         Refused(CommandRun.Of("outline", folder.PathOf("none/x.json")), ["x.json", "no such file"]);
         Directory.CreateDirectory(folder.PathOf("folder.dxf"));
         Refused(CommandRun.Of("outline", folder.PathOf("folder.dxf")), ["is a folder"]);
+        Directory.CreateDirectory(folder.PathOf("drawings"));
+        Refused(CommandRun.Of("outline", folder.PathOf("drawings")), ["drawings", "is a folder"]);
+        Refused(CommandRun.Of("outline", folder.PathOf("bracket")), ["no such file", "bracket.dxf"]);
+        Refused(CommandRun.Of("outline", ""), ["no such file"]);
         Refused(CommandRun.Of("outline", folder.Write("sheet.pdf", "x")), [".dxf", ".json", "'.pdf'"]);
     }
 
@@ -74,7 +78,11 @@ public class BadInputTests
     [InlineData("properties FILE other.dxf", "other.dxf", "one input")]
     [InlineData("properties FILE --elements 10 --element-size 1", "--element-size", "one of them")]
     [InlineData("properties FILE --elements 0", "--elements 0")]
-    [InlineData("properties FILE --elements many", "--elements", "many")]
+    [InlineData("properties FILE --elements many", "--elements many", "whole number")]
+    [InlineData("properties FILE --elements 99999999999", "--elements 99999999999", "5000000")]
+    [InlineData("properties FILE --min-angle 20,5", "--min-angle 20,5", "decimal point")]
+    [InlineData("properties FILE --sag 1e-300", "--sag 1E-300", "chords")]
+    [InlineData("properties @none.dxf", "@none.dxf", "no such file")]
     [InlineData("properties FILE --element-size 1e-5", "--element-size", "triangles")]
     [InlineData("properties FILE --min-angle 40", "--min-angle 40", "33")]
     [InlineData("properties FILE --min-angle NaN", "--min-angle")]
@@ -94,7 +102,7 @@ public class BadInputTests
     public void A_wrong_command_line_is_refused_with_the_option(string line, params string[] facts)
     {
         using var folder = new TemporaryFolder();
-        var drawing = folder.Write("square.dxf", DxfText.Drawing(Square));
+        var drawing = folder.Write("square.dxf", DxfText.Drawing(Square + DxfText.Circle(5, 5, 2)));
         var section = folder.Write("square.json", """{ "shapes": [{ "type": "rectangle", "width": "1 mm", "height": "1 mm" }] }""");
         Refused(CommandRun.Of(line.Split(' ').Select(w => w == "FILE" ? drawing : w == "JSON" ? section : w).ToArray()), facts);
     }
@@ -107,11 +115,21 @@ public class BadInputTests
         Refused(CommandRun.Of("properties", path), ["beam.json:3:", "shapes[0].width", "10 kg".Split(' ')[1]]);
     }
 
+    [Fact]
+    public void A_wrong_drawing_that_a_section_file_names_is_named_itself()
+    {
+        using var folder = new TemporaryFolder();
+        folder.Write("rail.dxf", DxfText.Drawing(DxfText.Line(0, 0, 1, 0)));
+        var path = folder.Write("rail.json", """{ "outline": { "drawing": "rail.dxf" } }""");
+        Refused(CommandRun.Of("properties", path), ["rail.dxf: ", "open", "#A1"]);
+    }
+
     private static void Refused(CommandRun run, IEnumerable<string> facts)
     {
         Assert.Equal((2, ""), (run.Status, run.Output));
         Assert.StartsWith("meshsection: ", run.Error, StringComparison.Ordinal);
         Assert.DoesNotContain("   at ", run.Error, StringComparison.Ordinal);
+        Assert.DoesNotContain("System.", run.Error, StringComparison.Ordinal);
         Assert.DoesNotContain("Exception", run.Error, StringComparison.Ordinal);
         Assert.All(facts, fact => Assert.Contains(fact, run.Error, StringComparison.Ordinal));
     }

@@ -72,11 +72,12 @@ public class TablesTests
     [InlineData("[suggest:16]", "meshsection prop", "properties")]
     [InlineData("[suggest:30]", "meshsection properties x --uni", "--unit")]
     [InlineData("[suggest:24]", "meshsection completion f", "fish")]
+    [InlineData("[suggest:25]", "meshsection mesh --quiet ", "--elements")]
     public void A_shell_completes_commands_and_options(string directive, string typed, string expected) =>
         Assert.Contains(expected, CommandRun.Of(directive, typed).Output.Split('\n', '\r'));
 
     [Theory]
-    [InlineData("bash", "complete -F")]
+    [InlineData("bash", "-F _meshsection meshsection")]
     [InlineData("zsh", "compdef")]
     [InlineData("fish", "complete -f -c meshsection")]
     [InlineData("powershell", "Register-ArgumentCompleter")]

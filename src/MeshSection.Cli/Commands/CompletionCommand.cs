@@ -13,7 +13,7 @@ internal static class CompletionCommand
             COMPREPLY=($(meshsection "[suggest:$COMP_POINT]" "$COMP_LINE" 2>/dev/null))
             [[ ${#COMPREPLY[@]} -eq 1 && ${COMPREPLY[0]} == */ ]] && compopt -o nospace
         }
-        complete -F _meshsection meshsection
+        complete -o default -F _meshsection meshsection
         """;
 
     private const string Zsh =

@@ -17,7 +17,7 @@ internal static class InputFiles
         {
             return File.OpenRead(path);
         }
-        catch (Exception fault) when (fault is FileNotFoundException or DirectoryNotFoundException)
+        catch (Exception fault) when (fault is FileNotFoundException or DirectoryNotFoundException or ArgumentException)
         {
             throw new CommandException($"{path}: there is no such file.{Suggestion(path)}");
         }

@@ -1,3 +1,4 @@
+using MeshSection.Geometry;
 using MeshSection.Integration;
 using MeshSection.Meshing;
 using MeshSection.Sections;
@@ -30,13 +31,11 @@ internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, doubl
     /// <summary>Flattens and meshes a section.</summary>
     /// <param name="section">The section.</param>
     /// <param name="unit">The unit of bare lengths.</param>
-    /// <exception cref="CommandException">The mesh would have more triangles than may be asked for.</exception>
+    /// <exception cref="CommandException">The mesh would have more triangles or chords than may be asked for.</exception>
     public (FlatOutline Flat, Mesh Mesh) Apply(Section section, LengthUnit unit)
     {
         var outline = section.Outline;
-        var flattening = Sag is { } sag
-            ? new Flattening(sag.In(LengthUnit.Millimetre, unit))
-            : Flattening.For(outline);
+        var flattening = Sag is { } sag ? WithSag(sag, outline, unit) : Flattening.For(outline);
         var flat = flattening.Apply(outline);
         var area = new BoundaryIntegrator(outline).Moments(outline.Bounds.Centre).Area;
         var settings = new MeshSettings();
@@ -48,6 +47,17 @@ internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, doubl
             MaxNodes = LeastNodeLimit + (int)(2 * area / maxArea),
         };
         return (flat, new DelaunayMesher().Triangulate(flat.Graph, settings));
+    }
+
+    private static Flattening WithSag(GivenLength sag, Outline outline, LengthUnit unit)
+    {
+        var flattening = new Flattening(sag.In(LengthUnit.Millimetre, unit));
+        var count = outline.Boundaries.SelectMany(b => b.Boundary.Edges)
+            .Sum(e => e.Steps(flattening.MaxSag, flattening.MaxTurn * Math.PI / 180));
+        return count <= LeastNodeLimit
+            ? flattening
+            : throw new CommandException(FormattableString.Invariant(
+                $"--sag {sag.Value}: would need about {count:G3} chords, and {LeastNodeLimit} are the most. Give a larger one."));
     }
 
     private double MaxArea(double area, LengthUnit unit)

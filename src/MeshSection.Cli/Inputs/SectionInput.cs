@@ -16,6 +16,11 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
     /// <exception cref="CommandException">Something in it is wrong.</exception>
     public static SectionInput Read(InputRequest request)
     {
+        using (InputFiles.Open(request.Path))
+        {
+            // Whatever the extension, that there is no such file comes first.
+        }
+
         try
         {
             var extension = Path.GetExtension(request.Path);
@@ -26,10 +31,6 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
                 _ => throw new CommandException(
                     $"{request.Path}: expected a drawing (.dxf) or a section file (.json), not '{extension}'."),
             };
-        }
-        catch (DrawingException fault)
-        {
-            throw new CommandException($"{request.Path}: {fault.Message}");
         }
         catch (SectionFileException fault)
         {
@@ -47,11 +48,6 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
 
     private static SectionInput OfSectionFile(InputRequest request)
     {
-        using (InputFiles.Open(request.Path))
-        {
-            // Only to say in the same words as for a drawing if there is no such file.
-        }
-
         var file = SectionFileReader.Read(request.Path);
         RefuseDrawingOptions(request, file);
         var material = request.Density is { } density ? new Material("material", density) : file.Material;
@@ -80,13 +76,20 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
         string path, LengthUnit? unit, IReadOnlyList<string> layers, GivenLength? tolerance)
     {
         using var stream = InputFiles.Open(path);
-        var drawing = new AsciiDxfReader().Read(stream);
-        var own = unit ?? drawing.Unit;
-        return DrawingOutliner.Outline(drawing, new OutlineOptions
+        try
         {
-            Unit = unit,
-            Layers = layers,
-            Joining = new Joining { MaxGap = own is null ? tolerance?.Value : tolerance?.In(own, own) },
-        });
+            var drawing = new AsciiDxfReader().Read(stream);
+            var own = unit ?? drawing.Unit;
+            return DrawingOutliner.Outline(drawing, new OutlineOptions
+            {
+                Unit = unit,
+                Layers = layers,
+                Joining = new Joining { MaxGap = own is null ? tolerance?.Value : tolerance?.In(own, own) },
+            });
+        }
+        catch (DrawingException fault)
+        {
+            throw new CommandException($"{path}: {fault.Message}");
+        }
     }
 }

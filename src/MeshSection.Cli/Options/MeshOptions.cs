@@ -1,4 +1,5 @@
 using System.CommandLine;
+using System.Globalization;
 using MeshSection.Cli.Inputs;
 
 namespace MeshSection.Cli.Options;
@@ -6,7 +7,7 @@ namespace MeshSection.Cli.Options;
 /// <summary>How fine the mesh is to be.</summary>
 internal sealed class MeshOptions
 {
-    private readonly Option<int?> _elements = new("--elements")
+    private readonly Option<string?> _elements = new("--elements")
     {
         Description = "About how many triangles to make [default: 1000; more where the outline needs them]",
         HelpName = "COUNT",
@@ -18,7 +19,7 @@ internal sealed class MeshOptions
         HelpName = "LENGTH",
     };
 
-    private readonly Option<double?> _minAngle = new("--min-angle")
+    private readonly Option<string?> _minAngle = new("--min-angle")
     {
         Description = "Smallest angle of a triangle, 0 to 33 degrees [default: 28]",
         HelpName = "DEGREES",
@@ -43,29 +44,30 @@ internal sealed class MeshOptions
     /// <exception cref="CommandException">A value is out of its range, or two say the same thing.</exception>
     public MeshRequest Of(ParseResult parsed)
     {
-        var elements = parsed.GetValue(_elements);
+        var elements = parsed.GetValue(_elements) is { } count ? Elements(count) : (int?)null;
         var size = GivenLength.Parse(parsed.GetValue(_elementSize), "--element-size");
-        var angle = parsed.GetValue(_minAngle);
         if (elements is not null && size is not null)
         {
             throw new CommandException("--elements and --element-size say the same thing: give one of them.");
         }
 
-        if (elements is < 1 or > MeshRequest.MostElements)
-        {
-            throw new CommandException($"--elements {elements}: expected 1 to {MeshRequest.MostElements}.");
-        }
-
-        if (angle is not (null or >= 0 and <= MeshRequest.LargestMinAngle))
-        {
-            throw new CommandException(
-                FormattableString.Invariant($"--min-angle {angle}: expected 0 to {MeshRequest.LargestMinAngle} degrees."));
-        }
-
         return new MeshRequest(
             elements ?? MeshRequest.DefaultElements,
             size,
-            angle,
+            parsed.GetValue(_minAngle) is { } angle ? MinAngle(angle) : null,
             GivenLength.Parse(parsed.GetValue(_sag), "--sag"));
     }
+
+    private static int Elements(string text) =>
+        int.TryParse(text, NumberStyles.Integer, CultureInfo.InvariantCulture, out var count) &&
+        count is >= 1 and <= MeshRequest.MostElements
+            ? count
+            : throw new CommandException($"--elements {text}: expected a whole number from 1 to {MeshRequest.MostElements}.");
+
+    private static double MinAngle(string text) =>
+        double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out var angle) &&
+        angle is >= 0 and <= MeshRequest.LargestMinAngle
+            ? angle
+            : throw new CommandException(FormattableString.Invariant(
+                $"--min-angle {text}: expected 0 to {MeshRequest.LargestMinAngle} degrees (with a decimal point)."));
 }

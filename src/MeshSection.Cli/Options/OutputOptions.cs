@@ -8,9 +8,10 @@ internal sealed class OutputOptions
     private readonly Option<bool> _json = new("--json")
     {
         Description = "Write the result as JSON, and nothing else, on standard output",
+        Arity = ArgumentArity.Zero,
     };
 
-    private readonly Option<FileInfo?> _out = new("--out")
+    private readonly Option<string?> _out = new("--out")
     {
         Description = "Write a picture (.png)",
         HelpName = "FILE",
@@ -19,6 +20,7 @@ internal sealed class OutputOptions
     private readonly Option<bool> _quiet = new("--quiet")
     {
         Description = "Write no table, and no cautions",
+        Arity = ArgumentArity.Zero,
     };
 
     /// <summary>Adds the options to a command.</summary>
@@ -36,18 +38,18 @@ internal sealed class OutputOptions
         var picture = parsed.GetValue(_out);
         if (picture is not null)
         {
-            if (!picture.Extension.Equals(".png", StringComparison.OrdinalIgnoreCase))
+            if (!Path.GetExtension(picture).Equals(".png", StringComparison.OrdinalIgnoreCase))
             {
                 throw new CommandException($"--out {picture}: pictures are written as PNG; give a name that ends in .png.");
             }
 
-            if (picture.Directory is { Exists: false } folder)
+            if (Path.GetDirectoryName(Path.GetFullPath(picture)) is { } folder && !Directory.Exists(folder))
             {
                 throw new CommandException($"--out {picture}: there is no folder {folder}.");
             }
         }
 
-        return new OutputRequest(parsed.GetValue(_json), picture?.FullName, parsed.GetValue(_quiet));
+        return new OutputRequest(parsed.GetValue(_json), picture, parsed.GetValue(_quiet));
     }
 }
 

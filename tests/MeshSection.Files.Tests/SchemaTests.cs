@@ -72,7 +72,8 @@ public class SchemaTests
         Assert.True(IsValid(File.ReadAllText(path)));
         var file = SectionFileReader.Read(path);
         Assert.NotEmpty(file.Title);
-        Assert.NotNull(file.Outline);
+        Assert.True(file.Outline is not null ^ file.Drawing is not null);
+        Assert.True(file.Drawing is null || File.Exists(file.Drawing.Path));
     }
 
     [Fact]

@@ -1,3 +1,4 @@
+using MeshSection.Cli.Tables;
 using MeshSection.Properties;
 
 namespace MeshSection.Cli.Commands;
@@ -18,7 +19,7 @@ internal static class CrossCheckVerdict
         }
 
         terminal.Error.WriteLine(FormattableString.Invariant(
-            $"meshsection: the two methods disagree: {worst.Quantity} differs by {worst.Difference:0e-0}. Do not use these results; the section is thinner than its coordinates can tell, or this is a fault of the program."));
+            $"meshsection: the two methods disagree: {CheckedWords.Of(worst.Quantity)} differs by {worst.Difference:0e-0}. Do not use these results; the section is thinner than its coordinates can tell, or this is a fault of the program."));
         return ExitStatus.CheckFailed;
     }
 }

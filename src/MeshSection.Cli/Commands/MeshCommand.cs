@@ -25,6 +25,11 @@ internal static class MeshCommand
     {
         var input = SectionInput.Read(request);
         var (flat, mesh) = meshRequest.Apply(input.Section, input.Unit);
+        if (output.Picture is { } picture)
+        {
+            Picture.Save(MeshFigure.Of(input.Section, mesh, input.Unit), picture, terminal, output);
+        }
+
         if (output.IsJson)
         {
             terminal.WriteJson(stream => MeshJson.Write(stream, mesh, input.Section.Outline.Origin, input.Unit));
@@ -32,11 +37,6 @@ internal static class MeshCommand
         else if (!output.IsQuiet)
         {
             MeshTable.Write(terminal.Tables(), input, flat, mesh);
-        }
-
-        if (output.Picture is { } picture)
-        {
-            Picture.Save(MeshFigure.Of(input.Section, mesh, input.Unit), picture, terminal, output);
         }
 
         Cautions.Write(terminal, input, output);

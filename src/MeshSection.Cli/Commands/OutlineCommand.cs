@@ -23,6 +23,11 @@ internal static class OutlineCommand
     private static int Run(Terminal terminal, InputRequest request, OutputRequest output)
     {
         var input = SectionInput.Read(request);
+        if (output.Picture is { } picture)
+        {
+            Picture.Save(OutlineFigure.Of(input.Section.Outline, input.Section.Title, input.Unit, DrawingMarks.Of(input)), picture, terminal, output);
+        }
+
         if (output.IsJson)
         {
             terminal.WriteJson(stream => OutlineJson.Write(stream, input.Section.Outline, input.Drawing?.Report, input.Unit));
@@ -30,11 +35,6 @@ internal static class OutlineCommand
         else if (!output.IsQuiet)
         {
             OutlineTable.Write(terminal.Tables(), input);
-        }
-
-        if (output.Picture is { } picture)
-        {
-            Picture.Save(OutlineFigure.Of(input.Section.Outline, input.Section.Title, input.Unit, DrawingMarks.Of(input)), picture, terminal, output);
         }
 
         return ExitStatus.Done;

@@ -37,6 +37,11 @@ internal static class PropertiesCommand
         var torsionTask = Task.Run(() => isConnected ? TorsionAnalysis.Of(flat, mesh) : null);
         var properties = PropertiesAnalysis.Of(input.Section, flat, mesh);
         var torsion = torsionTask.GetAwaiter().GetResult();
+        if (output.Picture is { } picture)
+        {
+            Picture.Save(SectionFigure.Of(input.Section, mesh, properties, input.Unit), picture, terminal, output);
+        }
+
         if (output.IsJson)
         {
             terminal.WriteJson(stream => PropertiesJson.Write(stream, properties, torsion, input.Unit));
@@ -44,11 +49,6 @@ internal static class PropertiesCommand
         else if (!output.IsQuiet)
         {
             PropertiesTable.Write(terminal.Tables(), input, properties, torsion);
-        }
-
-        if (output.Picture is { } picture)
-        {
-            Picture.Save(SectionFigure.Of(input.Section, mesh, properties, input.Unit), picture, terminal, output);
         }
 
         Cautions.Write(terminal, input, output);

@@ -14,10 +14,10 @@ internal static class ElasticTable
     /// <summary>Writes the table.</summary>
     public static void Write(IAnsiConsole console, SectionProperties p, Lengths lengths, double size)
     {
-        var (moduli, fibres) = ("Elastic moduli, " + lengths.Symbol(3), "Extreme fibres, " + lengths.Symbol());
+        const string Moduli = "Elastic moduli";
         if (console.Profile.Width >= LeastWidthForAll)
         {
-            var table = TableStyle.Columns(moduli, "", "", "distance " + lengths.Symbol(), "at (x, y)").KeepWhole(1, 2, 3);
+            var table = TableStyle.Columns(Moduli, lengths.Symbol(3), "", "distance " + lengths.Symbol(), "at (x, y)").KeepWhole(1, 2, 3);
             foreach (var side in Sides(p))
             {
                 table.AddRow(side.Name, Modulus(side), side.Verdict, Distance(side), Place(side));
@@ -27,8 +27,8 @@ internal static class ElasticTable
         }
         else
         {
-            var table = TableStyle.Columns(moduli, "", "").KeepWhole(1, 2);
-            var places = TableStyle.Columns(fibres, "distance", "at (x, y)").KeepWhole(1);
+            var table = TableStyle.Columns(Moduli, lengths.Symbol(3), "").KeepWhole(1, 2);
+            var places = TableStyle.Columns("Extreme fibres", "distance " + lengths.Symbol(), "at (x, y)").KeepWhole(1);
             foreach (var side in Sides(p))
             {
                 table.AddRow(side.Name, Modulus(side), side.Verdict);

@@ -10,7 +10,7 @@ internal static class Heading
     public static void Write(IAnsiConsole console, SectionInput input)
     {
         var title = input.Section.Title.Length > 0 ? input.Section.Title : "Section";
-        console.Write(new Text($"{title}, in {input.Unit.Symbol}", new Style(decoration: Decoration.Bold)));
+        console.Write(new Text($"{title} ({input.Unit.Symbol})", new Style(decoration: Decoration.Bold)));
         console.WriteLine();
         console.WriteLine();
     }

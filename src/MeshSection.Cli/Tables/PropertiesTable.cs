@@ -93,7 +93,7 @@ internal static class PropertiesTable
 
         var j = t.TorsionConstant;
         table.AddRow("torsion constant J", $"{lengths.Of(j.Value, 4)} {lengths.Symbol(4)}");
-        table.AddRow("proven bounds of J", $"{lengths.Of(j.Lower, 4)} to {lengths.Of(j.Upper, 4)}, {Digits.Small(j.Gap)} apart");
+        table.AddRow("proven bounds of J", $"{lengths.Of(j.Lower, 4)} to {lengths.Of(j.Upper, 4)}, {Digits.Small(j.Gap)} of J apart");
         if (t.OutlineDeviation > 0)
         {
             table.AddRow(
@@ -122,7 +122,7 @@ internal static class PropertiesTable
         var table = TableStyle.Columns("Checks", "");
         table.AddRow(
             $"{p.CrossChecks.Length} quantities by two methods",
-            $"differ by at most {Digits.Small(worst.Difference)} ({worst.Quantity})");
+            $"differ by at most {Digits.Small(worst.Difference)} of the value ({CheckedWords.Of(worst.Quantity)})");
         table.AddRow("mesh", $"{p.Mesh.Triangles} triangles, smallest angle {Digits.Of(p.Mesh.MinAngle)}°" +
             (p.Mesh.Unrefined == 0 ? "" : $"; {p.Mesh.Unrefined} not refined, see 'meshsection mesh'"));
         table.AddRow(

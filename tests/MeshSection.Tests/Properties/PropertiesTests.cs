@@ -8,11 +8,12 @@ public class PropertiesTests
     [Fact]
     public void Across_a_gap_the_plastic_neutral_axis_is_its_middle()
     {
-        static Boundary Plate(double y) => Boundary.Polygon(new(0, y), new(40, y), new(40, y + 10), new(0, y + 10));
-        var p = Pipeline.Properties(Outline.Create([Plate(100), Plate(150)]));
+        // 40 × 10 below and 20 × 20 above, the gap between them from 110 to 150 and not in the middle of the whole.
+        static Boundary Plate(double y, double width, double height) =>
+            Boundary.Polygon(new(0, y), new(width, y), new(width, y + height), new(0, y + height));
+        var p = Pipeline.Properties(Outline.Create([Plate(100, 40, 10), Plate(150, 20, 20)]));
         Assert.Equal(130, p.PlasticX.NeutralAxis, 1e-10);
-        // Two plates of 40 × 10, their middles 25 from the axis.
-        Assert.Equal(2 * 400 * 25, p.PlasticX.Modulus, 1e-8);
+        Assert.Equal(400 * (160 - 105), p.PlasticX.Modulus, 1e-8);
         Assert.All(p.CrossChecks, check => Assert.True(check.Difference < 1e-12, $"{check}"));
     }
 

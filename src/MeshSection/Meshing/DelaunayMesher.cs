@@ -21,9 +21,6 @@ public sealed class DelaunayMesher : IMesher
     /// <summary>The largest coordinate, mm, of which four may be multiplied without overflow.</summary>
     private const double LargestCoordinate = 1e60;
 
-    /// <summary>The smallest coordinate, mm, of which four may be multiplied exactly; below, it counts as 0.</summary>
-    private const double SmallestCoordinate = 1e-40;
-
     /// <inheritdoc/>
     /// <exception cref="ArgumentOutOfRangeException">A setting lies outside its range.</exception>
     /// <exception cref="ArgumentException">
@@ -39,7 +36,7 @@ public sealed class DelaunayMesher : IMesher
 
         ImmutableArray<Point> points = graph.Points;
         var mesh = new Triangulation(points.Length + 16, TriangleCapacity(graph, settings));
-        foreach (Point point in points) mesh.AddVertex(Sizeable(point.X), Sizeable(point.Y), -1);
+        foreach (Point point in points) mesh.AddGiven(point);
         if (PointInsertion.Run(mesh, cancellation))
         {
             SegmentInsertion.Run(mesh, graph.Segments, cancellation);
@@ -50,7 +47,27 @@ public sealed class DelaunayMesher : IMesher
         return MeshNumbering.Run(mesh, points, refiner);
     }
 
-    private static double Sizeable(double coordinate) => Math.Abs(coordinate) < SmallestCoordinate ? 0 : coordinate;
+    /// <inheritdoc/>
+    /// <exception cref="ArgumentOutOfRangeException">A setting lies outside its range, or a side is not positive.</exception>
+    /// <exception cref="ArgumentException">The mesh is not one of the graph, or the sides are not as many as its triangles.</exception>
+    public Mesh Refine(
+        Mesh mesh,
+        PlanarGraph graph,
+        ImmutableArray<double> sides,
+        MeshSettings settings,
+        CancellationToken cancellation = default)
+    {
+        ArgumentNullException.ThrowIfNull(mesh);
+        ArgumentNullException.ThrowIfNull(graph);
+        ArgumentNullException.ThrowIfNull(settings);
+        Check(settings);
+        Check(mesh, graph, sides);
+
+        Triangulation opened = MeshReopening.Run(mesh, graph);
+        var refiner = new Refiner(opened, graph, settings, new SizeMap(mesh, sides));
+        refiner.Run(cancellation);
+        return MeshNumbering.Run(opened, mesh.Nodes, refiner);
+    }
 
     private static int TriangleCapacity(PlanarGraph graph, MeshSettings settings)
     {
@@ -77,6 +94,33 @@ public sealed class DelaunayMesher : IMesher
             throw new ArgumentOutOfRangeException(
                 nameof(settings), settings.MaxArea, "The largest area must be positive.");
         }
+        if (!(settings.MaxSide > 0))
+        {
+            throw new ArgumentOutOfRangeException(
+                nameof(settings), settings.MaxSide, "The longest side must be positive.");
+        }
+        foreach (double side in settings.RegionMaxSides)
+        {
+            if (side > 0) continue;
+            throw new ArgumentOutOfRangeException(
+                nameof(settings), side, "The longest side in a region must be positive.");
+        }
+    }
+
+    private static void Check(Mesh mesh, PlanarGraph graph, ImmutableArray<double> sides)
+    {
+        if (sides.IsDefault || sides.Length != mesh.TriangleCount)
+        {
+            throw new ArgumentException(
+                $"{(sides.IsDefault ? 0 : sides.Length)} sides were given for {mesh.TriangleCount} triangles.", nameof(sides));
+        }
+        foreach (double side in sides)
+        {
+            if (!(side > 0)) throw new ArgumentOutOfRangeException(nameof(sides), side, "A side must be positive.");
+        }
+        bool isOfGraph = mesh.Nodes.Length >= graph.Points.Length
+            && mesh.Nodes.AsSpan()[..graph.Points.Length].SequenceEqual(graph.Points.AsSpan());
+        if (!isOfGraph) throw new ArgumentException("The mesh does not begin with the points of the graph.", nameof(mesh));
     }
 
     private static void Check(PlanarGraph graph)

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Numerics;
 using MeshSection.Geometry;
 
 namespace MeshSection.Meshing;
@@ -16,12 +17,19 @@ internal sealed class Refiner
     /// <summary>The shortest edge that may be split, in units of the largest coordinate.</summary>
     private const double LeastEdge = 1.0 / (1L << 44);
 
+    /// <summary>The urgency of a triangle that is only too large.</summary>
+    private const int BySize = 0;
+
     private readonly Triangulation mesh;
     private readonly ImmutableArray<Segment> segments;
     private readonly MeshSettings settings;
     private readonly Cavity cavity;
     private readonly TriangleQueue queue;
     private readonly SmallCorners smallCorners;
+    private readonly WantedSides sides;
+    private readonly SizeMap? map;
+    private readonly double uniformSideSquared;
+    private readonly bool isSizeVaried;
     private readonly double sinSquared;
     private readonly double lensCosSquared;
     private readonly double offCentre;
@@ -30,10 +38,18 @@ internal sealed class Refiner
     private int[] encroached = new int[64];
     private int encroachedCount;
 
-    public Refiner(Triangulation mesh, PlanarGraph graph, MeshSettings settings)
+    /// <param name="mesh">The triangulation to refine.</param>
+    /// <param name="graph">What it covers.</param>
+    /// <param name="settings">What is asked of it.</param>
+    /// <param name="map">What is asked of it besides, by an earlier mesh; null for nothing.</param>
+    public Refiner(Triangulation mesh, PlanarGraph graph, MeshSettings settings, SizeMap? map = null)
     {
         this.mesh = mesh;
         this.settings = settings;
+        this.map = map;
+        sides = new WantedSides(mesh, settings, map);
+        uniformSideSquared = sides.UniformSquared;
+        isSizeVaried = sides.IsVaried;
         segments = graph.Segments;
         cavity = new Cavity(mesh);
         queue = new TriangleQueue(mesh);
@@ -52,7 +68,7 @@ internal sealed class Refiner
     /// <summary>Refines until all is good, or no more can be done, or the limit on the number of nodes is reached.</summary>
     public void Run(CancellationToken cancellation)
     {
-        for (int t = mesh.TriangleCount - 1; t >= 0; t--) Examine(t);
+        ExamineAll();
         int round = 0;
         while (mesh.VertexCount < settings.MaxNodes)
         {
@@ -68,7 +84,7 @@ internal sealed class Refiner
             int now = Urgency(t, out int shortest, out bool isSpared);
             if (now < 0) continue;
             if (now < urgency) queue.Push(t, now);
-            else Refine(t, shortest, isSpared);
+            else if (now > BySize || !SplitLongSide(t)) Refine(t, shortest, isSpared);
         }
     }
 
@@ -78,6 +94,25 @@ internal sealed class Refiner
         int urgency = Urgency(t, out _, out bool isSpared);
         if (urgency < 0) return isSpared ? UnrefinedCause.InputAngle : null;
         return mesh.VertexCount >= settings.MaxNodes ? UnrefinedCause.NodeLimit : UnrefinedCause.LeastEdge;
+    }
+
+    /// <summary>
+    /// Examines every triangle, in steps that spread over the whole section: where very many share nearly one circle, as
+    /// in a polygon of 100 000 corners, each new vertex then changes few of them.
+    /// </summary>
+    private void ExamineAll()
+    {
+        int count = mesh.TriangleCount;
+        long step = SpreadingStep(count);
+        for (long i = 0, t = 0; i < count; i++, t = (t + step) % count) Examine((int)t);
+    }
+
+    /// <summary>Near the golden section of the count, and without a divisor in common: every triangle has its turn.</summary>
+    private static long SpreadingStep(int count)
+    {
+        long step = (long)(0.6180339887498949 * count);
+        while (BigInteger.GreatestCommonDivisor(step, count) > 1) step++;
+        return step;
     }
 
     private void Examine(int t)
@@ -91,7 +126,7 @@ internal sealed class Refiner
     }
 
     /// <summary>
-    /// How urgently triangle t wants refining: by the shortest edge for its angle, 0 for its area, -1 not at all.
+    /// How urgently triangle t wants refining: by the shortest edge for its angle, 0 for its size, -1 not at all.
     /// </summary>
     /// <param name="t">The triangle.</param>
     /// <param name="shortest">Its shortest edge.</param>
@@ -128,7 +163,9 @@ internal sealed class Refiner
             isSpared = IsSpared(shortest, twiceArea * twiceArea >= sinSquared * least * Math.Max(p, q));
             if (!isSpared) return Math.Clamp(largestExponent - Math.ILogB(least), 1, TriangleQueue.Top);
         }
-        return twiceArea > 2 * settings.MaxArea ? 0 : -1;
+        bool isTooLarge = twiceArea > 2 * settings.MaxArea
+            || Math.Max(p, q) > (isSizeVaried ? sides.SquaredAt(t) : uniformSideSquared);
+        return isTooLarge ? BySize : -1;
     }
 
     /// <summary>
@@ -165,8 +202,37 @@ internal sealed class Refiner
             if (Split(blocking)) PushAgain(t);
             return;
         }
-        cavity.Fill(mesh.AddVertex(place.X, place.Y, -1));
+        int near = mesh.Corners[4 * t];
+        cavity.Fill(AddVertex(place, -1, near));
         for (int i = 0; i < cavity.RimCount; i++) Examine(cavity.Triangle(i));
+    }
+
+    private int AddVertex(Point place, int home, int near)
+    {
+        int v = mesh.AddVertex(place.X, place.Y, home);
+        map?.Add(v, place, near);
+        return v;
+    }
+
+    /// <summary>Halves the longest side of triangle t if it is too long and lies on a segment.</summary>
+    private bool SplitLongSide(int t)
+    {
+        int longest = 4 * t;
+        for (int e = longest + 1; e < 4 * t + 3; e++)
+        {
+            if (LengthSquared(e) > LengthSquared(longest)) longest = e;
+        }
+        if (mesh.Segments[longest] < 0) return false;
+        if (LengthSquared(longest) <= (isSizeVaried ? sides.SquaredAt(t) : uniformSideSquared)) return false;
+        if (!Split(longest)) return false;
+        PushAgain(t);
+        return true;
+    }
+
+    private double LengthSquared(int e)
+    {
+        Point along = mesh.PointAt(mesh.To(e)) - mesh.PointAt(mesh.From(e));
+        return along.Dot(along);
     }
 
     private void PushAgain(int t)
@@ -219,7 +285,7 @@ internal sealed class Refiner
         int f = mesh.Twins[e];
         if (!IsBetween(e, place) || (f >= 0 && !IsBetween(f, place))) return false;
 
-        int first = mesh.SplitEdge(e, mesh.AddVertex(place.X, place.Y, s));
+        int first = mesh.SplitEdge(e, AddVertex(place, s, u));
         int around = first;
         do
         {

@@ -14,4 +14,8 @@ internal static class TriangleShape
     /// <summary>The smallest angle, degrees.</summary>
     public static double SmallestAngle(Point a, Point b, Point c) =>
         Math.Min(AngleAt(a, b, c), Math.Min(AngleAt(b, c, a), AngleAt(c, a, b)));
+
+    /// <summary>The longest side, in the unit of the corners.</summary>
+    public static double LongestSide(Point a, Point b, Point c) =>
+        Math.Max(a.DistanceTo(b), Math.Max(b.DistanceTo(c), c.DistanceTo(a)));
 }

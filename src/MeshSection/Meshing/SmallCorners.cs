@@ -10,7 +10,8 @@ namespace MeshSection.Meshing;
 /// </summary>
 internal sealed class SmallCorners
 {
-    private const double SmallAngle = Math.PI / 3 + 1e-9;
+    /// <summary>The largest small corner, degrees, and what rounding may add.</summary>
+    private const double SmallAngle = 60 + 1e-7;
 
     /// <summary>Circles differ by far more than this part of their radius, rounding by far less.</summary>
     private const double SameCircle = 1e-3;
@@ -26,7 +27,11 @@ internal sealed class SmallCorners
         this.mesh = mesh;
         segments = graph.Segments;
         isSmall = new bool[2 * segments.Length];
-        Find(graph.Points.Length);
+        foreach (InputAngle angle in InputAngles.Below(graph, SmallAngle))
+        {
+            Mark(angle.First, angle.Node);
+            Mark(angle.Second, angle.Node);
+        }
     }
 
     /// <summary>Whether segment s has a small corner at vertex v.</summary>
@@ -56,47 +61,5 @@ internal sealed class SmallCorners
     /// </summary>
     public static double Radius(double length) => Math.ScaleB(1, Math.ILogB(2 * length / 3));
 
-    private void Find(int pointCount)
-    {
-        var starts = new int[pointCount + 1];
-        foreach (Segment s in segments)
-        {
-            starts[s.From]++;
-            starts[s.To]++;
-        }
-        for (int v = 1; v <= pointCount; v++) starts[v] += starts[v - 1];
-        var ends = new int[2 * segments.Length];
-        for (int end = 0; end < ends.Length; end++)
-        {
-            Segment s = segments[end >> 1];
-            ends[--starts[(end & 1) == 0 ? s.From : s.To]] = end;
-        }
-        for (int v = 0; v < pointCount; v++)
-        {
-            if (starts[v + 1] - starts[v] > 1) FindAt(ends.AsSpan(starts[v]..starts[v + 1]));
-        }
-    }
-
-    private void FindAt(Span<int> ends)
-    {
-        var directions = new double[ends.Length];
-        for (int i = 0; i < ends.Length; i++) directions[i] = Direction(ends[i]);
-        MemoryExtensions.Sort(directions.AsSpan(), ends);
-        for (int i = 0; i < ends.Length; i++)
-        {
-            int j = (i + 1) % ends.Length;
-            double angle = directions[j] - directions[i];
-            if (j == 0) angle += Math.Tau;
-            if (angle > SmallAngle) continue;
-            isSmall[ends[i]] = true;
-            isSmall[ends[j]] = true;
-        }
-    }
-
-    private double Direction(int end)
-    {
-        Segment s = segments[end >> 1];
-        Point along = mesh.PointAt(s.To) - mesh.PointAt(s.From);
-        return (end & 1) == 0 ? Math.Atan2(along.Y, along.X) : Math.Atan2(-along.Y, -along.X);
-    }
+    private void Mark(int s, int v) => isSmall[segments[s].From == v ? 2 * s : 2 * s + 1] = true;
 }

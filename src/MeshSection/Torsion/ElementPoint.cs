@@ -13,7 +13,7 @@ namespace MeshSection.Torsion;
 /// nothing. With g constant it is the isoparametric triangle of second order.
 /// </remarks>
 /// <param name="mesh">The fitted mesh.</param>
-internal sealed class ElementPoint(CurvedMesh mesh)
+internal sealed class ElementPoint(CentredMesh mesh)
 {
     private readonly Point[] _corners = new Point[3];
     private readonly EdgeBow?[] _bows = new EdgeBow?[3];

@@ -38,7 +38,7 @@ internal sealed class ElementSums
     /// <param name="mesh">The fitted mesh, about its centroid.</param>
     /// <param name="nodes">Its nodes.</param>
     /// <param name="poissonRatio">ν.</param>
-    public static ElementSums Of(CurvedMesh mesh, QuadraticNodes nodes, double poissonRatio)
+    public static ElementSums Of(CentredMesh mesh, QuadraticNodes nodes, double poissonRatio)
     {
         var sums = new ElementSums(nodes);
         var point = new ElementPoint(mesh);

@@ -52,7 +52,7 @@ internal sealed record FieldIntegrals
     /// <param name="nodes">Its nodes.</param>
     /// <param name="fields">The fields.</param>
     /// <param name="poissonRatio">ν for which they were solved.</param>
-    public static FieldIntegrals Of(CurvedMesh mesh, QuadraticNodes nodes, WarpingFields fields, double poissonRatio)
+    public static FieldIntegrals Of(CentredMesh mesh, QuadraticNodes nodes, WarpingFields fields, double poissonRatio)
     {
         var sums = new FieldIntegrals();
         var point = new ElementPoint(mesh);

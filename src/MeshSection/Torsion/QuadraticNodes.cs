@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MeshSection.LinearAlgebra;
 using MeshSection.Meshing;
 
@@ -10,9 +11,9 @@ namespace MeshSection.Torsion;
 internal sealed class QuadraticNodes
 {
     /// <summary>Nodes of one triangle.</summary>
-    public const int PerTriangle = 6;
+    public const int PerTriangle = CurvedMesh.NodesPerTriangle;
 
-    private QuadraticNodes(int[] triangles, int[] ranks)
+    private QuadraticNodes(ImmutableArray<int> triangles, int[] ranks)
     {
         Triangles = triangles;
         Ranks = ranks;
@@ -22,43 +23,16 @@ internal sealed class QuadraticNodes
     public int Count => Ranks.Length;
 
     /// <summary>Node i of triangle t at 6t + i: the corners, then the edge opposite each of them.</summary>
-    public int[] Triangles { get; }
+    public ImmutableArray<int> Triangles { get; }
 
     /// <summary>The place of each node in a good order of elimination.</summary>
     public int[] Ranks { get; }
 
-    /// <summary>Numbers the nodes of a mesh.</summary>
-    public static QuadraticNodes Of(Mesh mesh)
-    {
-        var count = mesh.Nodes.Length;
-        var triangles = new int[PerTriangle * mesh.TriangleCount];
-        for (var t = 0; t < mesh.TriangleCount; t++)
-        {
-            for (var k = 0; k < 3; k++)
-            {
-                triangles[6 * t + k] = mesh.Corners[3 * t + k];
-                var neighbour = mesh.Neighbours[3 * t + k];
-                triangles[6 * t + 3 + k] = neighbour >= 0 && neighbour < t
-                    ? triangles[6 * neighbour + 3 + SideTo(mesh, neighbour, t)]
-                    : count++;
-            }
-        }
+    /// <summary>Ranks the nodes of a mesh.</summary>
+    public static QuadraticNodes Of(CurvedMesh curved) =>
+        new(curved.Elements, RankNodes(curved.Mesh, curved.Elements, curved.Nodes.Length));
 
-        return new QuadraticNodes(triangles, RankNodes(mesh, triangles, count));
-    }
-
-    private static int SideTo(Mesh mesh, int triangle, int neighbour)
-    {
-        var k = 0;
-        while (mesh.Neighbours[3 * triangle + k] != neighbour)
-        {
-            k++;
-        }
-
-        return k;
-    }
-
-    private static int[] RankNodes(Mesh mesh, int[] triangles, int count)
+    private static int[] RankNodes(Mesh mesh, ImmutableArray<int> triangles, int count)
     {
         var corners = mesh.Nodes.Length;
         var order = MinimumDegree.Order(SymmetricPattern.OfElements(mesh.Corners.AsSpan(), 3, corners));

@@ -22,7 +22,7 @@ internal static class StressFunction
     /// <param name="outer">The outer boundary; all others are holes.</param>
     /// <param name="enclosed">The area inside each boundary, mm², negative for holes.</param>
     public static double LowerBound(
-        CurvedMesh mesh, QuadraticNodes nodes, ElementSums sums, int outer, ReadOnlySpan<double> enclosed)
+        CentredMesh mesh, QuadraticNodes nodes, ElementSums sums, int outer, ReadOnlySpan<double> enclosed)
     {
         var boundaries = BoundaryNodes(mesh, nodes);
         var (unknowns, interior) = Unknowns(nodes, boundaries, outer);
@@ -88,7 +88,7 @@ internal static class StressFunction
     private static int Hole(int boundary, int outer) => boundary < outer ? boundary : boundary - 1;
 
     /// <summary>The boundary on which each node lies, or -1.</summary>
-    private static int[] BoundaryNodes(CurvedMesh mesh, QuadraticNodes nodes)
+    private static int[] BoundaryNodes(CentredMesh mesh, QuadraticNodes nodes)
     {
         var boundaries = new int[nodes.Count];
         Array.Fill(boundaries, -1);

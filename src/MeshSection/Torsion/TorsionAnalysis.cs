@@ -31,14 +31,14 @@ public static class TorsionAnalysis
             throw new TorsionException(TorsionFault.PoissonRatio, poissonRatio);
         }
 
-        var fitted = CurvedMesh.Fit(flat, mesh);
+        var fitted = CentredMesh.Of(flat, CurvedMesh.Fit(flat, mesh));
         var centre = flat.Outline.Bounds.Centre;
         var whole = fitted.About(centre).EnclosedMoments().Aggregate((sum, part) => sum + part);
         var centroid = centre + whole.Centroid;
         fitted = fitted.About(centroid);
         var enclosed = fitted.EnclosedMoments().Select(m => m.Area).ToArray();
         var outer = flat.Outline.Boundaries.IndexOf(flat.Outline.Boundaries.Single(b => b.Role == BoundaryRole.Outer));
-        var nodes = QuadraticNodes.Of(mesh);
+        var nodes = QuadraticNodes.Of(fitted.Curved);
         var sums = ElementSums.Of(fitted, nodes, poissonRatio);
         var lower = StressFunction.LowerBound(fitted, nodes, sums, outer, enclosed);
         var fields = WarpingFields.Solve(nodes, sums);
@@ -65,7 +65,7 @@ public static class TorsionAnalysis
             ElasticShearCentre = flat.Outline.Origin + centroid + elastic,
             WarpingConstant = integrals.WarpingSquare - pole.Y * xw + pole.X * yw,
             ShearFlexibility = new ShearFlexibility(Energy(forX, forX), Energy(forY, forY), Energy(forX, forY)),
-            OutlineDeviation = fitted.Deviation,
+            OutlineDeviation = fitted.Curved.Deviation,
         };
 
         double Energy(Point a, Point b) => a.X * b.X * integrals.Energy11 + a.Y * b.Y * integrals.Energy22

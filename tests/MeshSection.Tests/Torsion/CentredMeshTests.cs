@@ -6,7 +6,7 @@ using MeshSection.Torsion;
 
 namespace MeshSection.Tests.Torsion;
 
-public class CurvedMeshTests
+public class CentredMeshTests
 {
     [Theory]
     [InlineData(1e-4, 15)]
@@ -17,7 +17,7 @@ public class CurvedMeshTests
         var outline = Outline.Create(Solids.Eccentric(50, 20, 10));
         var fitted = Fit(outline, new Flattening(sag * 100, turn), 40);
         var exact = new BoundaryIntegrator(outline).Moments(default);
-        Assert.Equal(0, fitted.Deviation);
+        Assert.Equal(0, fitted.Curved.Deviation);
         var byTriangles = ByTriangles(fitted);
         Assert.Equal(exact.Area, byTriangles.Area, 1e-9 * exact.Area);
         Assert.Equal(exact.XX, byTriangles.XX, 1e-9 * exact.XX);
@@ -63,10 +63,10 @@ public class CurvedMeshTests
         ]);
         var flat = new Flattening(2, 40).Apply(outline);
         var mesh = new DelaunayMesher().Triangulate(flat.Graph, new MeshSettings { MinAngle = 0 }, TestContext.Current.CancellationToken);
-        var fitted = CurvedMesh.Fit(flat, mesh);
-        Assert.InRange(fitted.Deviation, 1, flat.MaxSag);
+        var fitted = CentredMesh.Of(flat, CurvedMesh.Fit(flat, mesh));
+        Assert.InRange(fitted.Curved.Deviation, 1, flat.MaxSag);
         var p = TorsionAnalysis.Of(flat, mesh);
-        Assert.Equal(fitted.Deviation, p.OutlineDeviation);
+        Assert.Equal(fitted.Curved.Deviation, p.OutlineDeviation);
         Assert.True(p.TorsionConstant.Lower < p.TorsionConstant.Upper);
         Assert.Equal(p.Area, ByTriangles(fitted).Area, 1e-9 * p.Area);
     }
@@ -78,8 +78,8 @@ public class CurvedMeshTests
         var flat = new Flattening(5, 30).Apply(outline);
         var mesh = new DelaunayMesher().Triangulate(
             flat.Graph, new MeshSettings { MaxArea = 0.3 }, TestContext.Current.CancellationToken);
-        var fitted = CurvedMesh.Fit(flat, mesh);
-        Assert.Equal(0, fitted.Deviation);
+        var fitted = CentredMesh.Of(flat, CurvedMesh.Fit(flat, mesh));
+        Assert.Equal(0, fitted.Curved.Deviation);
         Assert.Equal(Math.PI * 2100, ByTriangles(fitted).Area, 1e-8);
     }
 
@@ -126,15 +126,15 @@ public class CurvedMeshTests
         }
     }
 
-    private static CurvedMesh Fit(Outline outline, Flattening flattening, double triangles)
+    private static CentredMesh Fit(Outline outline, Flattening flattening, double triangles)
     {
         var flat = flattening.Apply(outline);
         var area = new BoundaryIntegrator(outline).Moments(default).Area;
         var mesh = new DelaunayMesher().Triangulate(flat.Graph, new MeshSettings { MaxArea = area / triangles });
-        return CurvedMesh.Fit(flat, mesh);
+        return CentredMesh.Of(flat, CurvedMesh.Fit(flat, mesh));
     }
 
-    private static AreaMoments ByTriangles(CurvedMesh mesh)
+    private static AreaMoments ByTriangles(CentredMesh mesh)
     {
         var point = new ElementPoint(mesh);
         var sum = default(AreaMoments);

@@ -1,20 +1,17 @@
-using MeshSection.Meshing;
-
-namespace MeshSection.Torsion;
+namespace MeshSection.Meshing;
 
 /// <summary>Finds triangles that fitting to the curves has turned inside out.</summary>
 internal static class FoldedTriangles
 {
-    // Least over greatest stretch of a triangle at its integration points: enough to be sure of those in between.
+    // Least over greatest stretch of a triangle.
     private const double LeastStretch = 0.05;
 
     /// <summary>True if there is one.</summary>
     public static bool Exist(CurvedMesh fitted)
     {
-        var point = new ElementPoint(fitted);
         for (var t = 0; t < fitted.Mesh.TriangleCount; t++)
         {
-            if (IsFolded(point, t))
+            if (IsFolded(fitted, t))
             {
                 return true;
             }
@@ -33,10 +30,9 @@ internal static class FoldedTriangles
         var mesh = fitted.Mesh;
         var folded = new bool[mesh.Nodes.Length];
         var isAny = false;
-        var point = new ElementPoint(fitted);
         for (var t = 0; t < mesh.TriangleCount; t++)
         {
-            if (IsFolded(point, t))
+            if (IsFolded(fitted, t))
             {
                 isAny = true;
                 for (var k = 0; k < 3; k++)
@@ -60,17 +56,20 @@ internal static class FoldedTriangles
         return isChanged;
     }
 
-    private static bool IsFolded(ElementPoint point, int triangle)
+    private static bool IsFolded(CurvedMesh fitted, int t)
     {
-        point.Enter(triangle);
-        var (least, greatest) = (double.PositiveInfinity, double.NegativeInfinity);
-        for (var q = 0; q < (point.IsCurved ? point.Count : 1); q++)
+        var (least, greatest) = SecondOrderStretch.Bounds(fitted, t);
+        if (!(least > LeastStretch * greatest))
         {
-            point.Move(q);
-            least = Math.Min(least, point.Determinant);
-            greatest = Math.Max(greatest, point.Determinant);
+            return true;
         }
 
-        return !(least > LeastStretch * greatest && least > 0);
+        if (fitted.Curves[3 * t] is null && fitted.Curves[3 * t + 1] is null && fitted.Curves[3 * t + 2] is null)
+        {
+            return false;
+        }
+
+        (least, greatest) = CurvedStretch.Bounds(fitted, t);
+        return !(least > LeastStretch * greatest);
     }
 }

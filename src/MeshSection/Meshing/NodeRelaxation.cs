@@ -1,7 +1,6 @@
 using MeshSection.Geometry;
-using MeshSection.Meshing;
 
-namespace MeshSection.Torsion;
+namespace MeshSection.Meshing;
 
 /// <summary>
 /// Lets the nodes inside follow those that were moved onto the curves. Where triangles are much smaller than the chord on
@@ -15,7 +14,7 @@ internal static class NodeRelaxation
     /// <summary>Moves each node inside by the mean of what its neighbours move, several times over.</summary>
     /// <param name="mesh">The mesh.</param>
     /// <param name="corners">Where the nodes lie, those on the outline moved already; the others are moved here.</param>
-    public static void Run(Mesh mesh, Point[] corners)
+    public static void Run(Mesh mesh, Span<Point> corners)
     {
         var isFixed = new bool[corners.Length];
         for (var e = 0; e < mesh.Segments.Length; e++)

@@ -23,7 +23,7 @@ internal static class OutlineCommand
     private static int Run(Terminal terminal, InputRequest request, OutputRequest output)
     {
         var input = SectionInput.Read(request);
-        if (output.Picture is { } picture)
+        foreach (var picture in output.Pictures)
         {
             Picture.Save(OutlineFigure.Of(input.Section.Outline, input.Section.Title, input.Unit, DrawingMarks.Of(input)), picture, terminal, output);
         }

@@ -12,6 +12,9 @@ namespace MeshSection.Cli.Commands;
 /// <summary>Every area property of a section, each by two methods.</summary>
 internal static class PropertiesCommand
 {
+    // Torsion solves for a number at each corner and each side.
+    private static readonly MemoryNeed Memory = new(4000);
+
     public static Command Create(Terminal terminal)
     {
         var (input, mesh, output) = (new InputOptions(), new MeshOptions(), new OutputOptions());
@@ -32,12 +35,12 @@ internal static class PropertiesCommand
     private static int Run(Terminal terminal, InputRequest request, MeshRequest meshRequest, OutputRequest output)
     {
         var input = SectionInput.Read(request);
-        var (flat, mesh) = meshRequest.Apply(input.Section, input.Unit);
+        var (flat, mesh) = meshRequest.Apply(input.Section, input.Unit, Memory);
         var isConnected = input.Section.Outline.RegionCount == 1;
         var torsionTask = Task.Run(() => isConnected ? TorsionAnalysis.Of(flat, mesh) : null);
         var properties = PropertiesAnalysis.Of(input.Section, flat, mesh);
         var torsion = torsionTask.GetAwaiter().GetResult();
-        if (output.Picture is { } picture)
+        foreach (var picture in output.Pictures)
         {
             Picture.Save(SectionFigure.Of(input.Section, mesh, properties, input.Unit), picture, terminal, output);
         }

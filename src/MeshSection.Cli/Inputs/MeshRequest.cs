@@ -7,11 +7,13 @@ using MeshSection.Units;
 namespace MeshSection.Cli.Inputs;
 
 /// <summary>What the command line says of the mesh.</summary>
-/// <param name="Elements">About how many triangles to make, if no size is given.</param>
-/// <param name="ElementSize">The largest side of a triangle, if given.</param>
+/// <param name="Elements">How many triangles to make, if no size is given.</param>
+/// <param name="ElementSize">The longest side of a triangle, if given.</param>
+/// <param name="Across">How many elements to have across every wall, if given.</param>
 /// <param name="MinAngle">The smallest angle wanted, degrees, if given.</param>
 /// <param name="Sag">The farthest that a chord may lie from its curve, if given.</param>
-internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, double? MinAngle, GivenLength? Sag)
+internal sealed record MeshRequest(
+    int Elements, GivenLength? ElementSize, int? Across, double? MinAngle, GivenLength? Sag)
 {
     /// <summary>Triangles made by default: enough for a picture, and for exact integrals any number is.</summary>
     public const int DefaultElements = 1000;
@@ -19,34 +21,94 @@ internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, doubl
     /// <summary>The most triangles that may be asked for.</summary>
     public const int MostElements = 5_000_000;
 
+    /// <summary>The most elements across a wall that may be asked for.</summary>
+    public const int MostAcross = 1000;
+
     /// <summary>The largest minimum angle that may be asked for, degrees.</summary>
     public const double LargestMinAngle = 33;
+
+    /// <summary>The largest minimum angle for which refinement is proven to end, degrees.</summary>
+    public const double ProvenMinAngle = 28.6;
 
     // Nodes that an outline may need for its own small features, whatever the size of its triangles.
     private const int LeastNodeLimit = 300_000;
 
-    // Refinement halves areas until they fit, so that the mean ends near two thirds of the largest.
-    private const double MeanOverLargest = 0.65;
+    // An equilateral triangle of the longest side, for each triangle that a mesh of that longest side has.
+    private const double FitsPerTriangle = 0.46;
+
+    /// <summary>What is said of single places.</summary>
+    public MeshDetail Detail { get; init; } = MeshDetail.None;
 
     /// <summary>Flattens and meshes a section.</summary>
     /// <param name="section">The section.</param>
     /// <param name="unit">The unit of bare lengths.</param>
-    /// <exception cref="CommandException">The mesh would have more triangles or chords than may be asked for.</exception>
-    public (FlatOutline Flat, Mesh Mesh) Apply(Section section, LengthUnit unit)
+    /// <param name="memory">What the work takes for each triangle, so that it is refused before the memory runs out.</param>
+    /// <exception cref="CommandException">
+    /// The mesh would have more triangles or chords than may be asked for or memory holds, or a point or line to keep does
+    /// not lie in the section.
+    /// </exception>
+    public (FlatOutline Flat, Mesh Mesh) Apply(Section section, LengthUnit unit, MemoryNeed memory)
     {
         var outline = section.Outline;
-        var flattening = Sag is { } sag ? WithSag(sag, outline, unit) : Flattening.For(outline);
-        var flat = flattening.Apply(outline);
+        var flat = Flatten(outline, unit);
         var area = new BoundaryIntegrator(outline).Moments(outline.Bounds.Centre).Area;
-        var settings = new MeshSettings();
-        var maxArea = MaxArea(area, unit);
-        settings = settings with
+        var mesher = new DelaunayMesher();
+        var settings = new MeshSettings
         {
-            MinAngle = MinAngle ?? settings.MinAngle,
-            MaxArea = maxArea,
-            MaxNodes = LeastNodeLimit + (int)(2 * area / maxArea),
+            SizeField = Detail.SizeField(outline, unit),
+            RegionMaxSides = Detail.RegionMaxSides(section, unit),
         };
-        return (flat, new DelaunayMesher().Triangulate(flat.Graph, settings));
+        settings = settings with { MinAngle = MinAngle ?? settings.MinAngle };
+        Mesh mesh;
+        if (ElementSize is { } size)
+        {
+            var side = size.In(LengthUnit.Millimetre, unit);
+            var count = area / (FitsPerTriangle * Math.Sqrt(3) / 4 * side * side);
+            Refuse(count, $"--element-size {size.Value}", "Give a longer one.", memory);
+            settings = settings with { MaxSide = side, MaxNodes = LeastNodeLimit + (int)count };
+            mesh = mesher.Triangulate(flat.Graph, settings);
+        }
+        else
+        {
+            Refuse(Elements, $"--elements {Elements}", "Give fewer.", memory);
+            settings = settings with { MaxNodes = LeastNodeLimit + Elements };
+            mesh = MeshSizing.ForCount(mesher, flat.Graph, settings, area, Elements);
+        }
+
+        return (flat, Across is { } across ? Refined(mesher, mesh, flat.Graph, settings, across, memory) : mesh);
+    }
+
+    private static Mesh Refined(
+        DelaunayMesher mesher, Mesh mesh, PlanarGraph graph, MeshSettings settings, int across, MemoryNeed memory)
+    {
+        var count = mesh.TriangleCount + WallSurvey.Of(mesh, graph).Estimate(across);
+        Refuse(count, $"--across {across}", "Give fewer.", memory);
+        settings = settings with { MaxNodes = settings.MaxNodes + (int)count };
+        return MeshSizing.AcrossWalls(mesher, mesh, graph, settings, across);
+    }
+
+    private static void Refuse(double count, string option, string advice, MemoryNeed memory)
+    {
+        if (count > MostElements)
+        {
+            throw new CommandException(FormattableString.Invariant(
+                $"{option}: would need about {count:G3} triangles, and {MostElements} are the most. {advice}"));
+        }
+
+        memory.Check(count, option, advice);
+    }
+
+    private FlatOutline Flatten(Outline outline, LengthUnit unit)
+    {
+        var flattening = Sag is { } sag ? WithSag(sag, outline, unit) : Flattening.For(outline);
+        try
+        {
+            return flattening.Apply(outline, Detail.Constraints(outline, unit));
+        }
+        catch (ConstraintException fault)
+        {
+            throw new CommandException(ConstraintWords.Of(fault, outline, unit));
+        }
     }
 
     private static Flattening WithSag(GivenLength sag, Outline outline, LengthUnit unit)
@@ -58,22 +120,5 @@ internal sealed record MeshRequest(int Elements, GivenLength? ElementSize, doubl
             ? flattening
             : throw new CommandException(FormattableString.Invariant(
                 $"--sag {sag.Value}: would need about {count:G3} chords, and {LeastNodeLimit} are the most. Give a larger one."));
-    }
-
-    private double MaxArea(double area, LengthUnit unit)
-    {
-        if (ElementSize is not { } size)
-        {
-            return area / (MeanOverLargest * Elements);
-        }
-
-        // An equilateral triangle of that side.
-        var side = size.In(LengthUnit.Millimetre, unit);
-        var largest = Math.Sqrt(3) / 4 * side * side;
-        var count = area / (MeanOverLargest * largest);
-        return count <= MostElements
-            ? largest
-            : throw new CommandException(FormattableString.Invariant(
-                $"--element-size {size.Value}: would need about {count:G3} triangles, and {MostElements} are the most. Give a larger size."));
     }
 }

@@ -15,8 +15,14 @@ internal sealed class MeshOptions
 
     private readonly Option<string?> _elementSize = new("--element-size")
     {
-        Description = "Largest side of a triangle, instead of --elements: 2, \"2 mm\"",
+        Description = "Longest side of any triangle, instead of --elements: 2, \"2 mm\"",
         HelpName = "LENGTH",
+    };
+
+    private readonly Option<string?> _across = new("--across")
+    {
+        Description = "At least this many elements across every wall, however thin",
+        HelpName = "COUNT",
     };
 
     private readonly Option<string?> _minAngle = new("--min-angle")
@@ -36,6 +42,7 @@ internal sealed class MeshOptions
     {
         command.Add(_elements);
         command.Add(_elementSize);
+        command.Add(_across);
         command.Add(_minAngle);
         command.Add(_sag);
     }
@@ -44,7 +51,7 @@ internal sealed class MeshOptions
     /// <exception cref="CommandException">A value is out of its range, or two say the same thing.</exception>
     public MeshRequest Of(ParseResult parsed)
     {
-        var elements = parsed.GetValue(_elements) is { } count ? Elements(count) : (int?)null;
+        var elements = Count(parsed, _elements, MeshRequest.MostElements);
         var size = GivenLength.Parse(parsed.GetValue(_elementSize), "--element-size");
         if (elements is not null && size is not null)
         {
@@ -54,15 +61,15 @@ internal sealed class MeshOptions
         return new MeshRequest(
             elements ?? MeshRequest.DefaultElements,
             size,
+            Count(parsed, _across, MeshRequest.MostAcross),
             parsed.GetValue(_minAngle) is { } angle ? MinAngle(angle) : null,
             GivenLength.Parse(parsed.GetValue(_sag), "--sag"));
     }
 
-    private static int Elements(string text) =>
-        int.TryParse(text, NumberStyles.Integer, CultureInfo.InvariantCulture, out var count) &&
-        count is >= 1 and <= MeshRequest.MostElements
-            ? count
-            : throw new CommandException($"--elements {text}: expected a whole number from 1 to {MeshRequest.MostElements}.");
+    private static int? Count(ParseResult parsed, Option<string?> option, int most) =>
+        parsed.GetValue(option) is not { } text ? null
+        : int.TryParse(text, NumberStyles.Integer, CultureInfo.InvariantCulture, out var count) && count >= 1 && count <= most ? count
+        : throw new CommandException($"{option.Name} {text}: expected a whole number from 1 to {most}.");
 
     private static double MinAngle(string text) =>
         double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out var angle) &&

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using System.CommandLine;
 
 namespace MeshSection.Cli.Options;
@@ -5,23 +6,31 @@ namespace MeshSection.Cli.Options;
 /// <summary>Where results go.</summary>
 internal sealed class OutputOptions
 {
+    private const string Picture = ".png";
+
+    private readonly string[] _extensions;
     private readonly Option<bool> _json = new("--json")
     {
         Description = "Write the result as JSON, and nothing else, on standard output",
         Arity = ArgumentArity.Zero,
     };
 
-    private readonly Option<string?> _out = new("--out")
-    {
-        Description = "Write a picture (.png)",
-        HelpName = "FILE",
-    };
+    private readonly Option<string[]> _out = new("--out") { HelpName = "FILE" };
 
     private readonly Option<bool> _quiet = new("--quiet")
     {
         Description = "Write no table, and no cautions",
         Arity = ArgumentArity.Zero,
     };
+
+    /// <param name="meshFiles">Extensions of files other than pictures that --out may name.</param>
+    public OutputOptions(params string[] meshFiles)
+    {
+        _extensions = [Picture, .. meshFiles];
+        _out.Description = meshFiles.Length == 0
+            ? "Write a picture (.png)"
+            : $"Write a picture (.png) or the mesh ({string.Join(", ", meshFiles)}). May be repeated";
+    }
 
     /// <summary>Adds the options to a command.</summary>
     public void AddTo(Command command)
@@ -32,29 +41,45 @@ internal sealed class OutputOptions
     }
 
     /// <summary>What the command line asks for.</summary>
-    /// <exception cref="CommandException">The picture's name does not end in .png, or its folder does not exist.</exception>
+    /// <exception cref="CommandException">A file's name has another extension, or its folder does not exist.</exception>
     public OutputRequest Of(ParseResult parsed)
     {
-        var picture = parsed.GetValue(_out);
-        if (picture is not null)
+        string[] files = parsed.GetValue(_out) ?? [];
+        foreach (var file in files)
         {
-            if (!Path.GetExtension(picture).Equals(".png", StringComparison.OrdinalIgnoreCase))
-            {
-                throw new CommandException($"--out {picture}: pictures are written as PNG; give a name that ends in .png.");
-            }
-
-            if (Path.GetDirectoryName(Path.GetFullPath(picture)) is { } folder && !Directory.Exists(folder))
-            {
-                throw new CommandException($"--out {picture}: there is no folder {folder}.");
-            }
+            Check(file);
         }
 
-        return new OutputRequest(parsed.GetValue(_json), picture, parsed.GetValue(_quiet));
+        return new OutputRequest(
+            parsed.GetValue(_json),
+            [.. files.Where(f => Has(f, Picture))],
+            [.. files.Where(f => !Has(f, Picture))],
+            parsed.GetValue(_quiet));
+    }
+
+    private static bool Has(string file, string extension) =>
+        Path.GetExtension(file).Equals(extension, StringComparison.OrdinalIgnoreCase);
+
+    private void Check(string file)
+    {
+        if (!_extensions.Any(e => Has(file, e)))
+        {
+            throw new CommandException(_extensions.Length == 1
+                ? $"--out {file}: pictures are written as PNG; give a name that ends in .png."
+                : $"--out {file}: give a name that ends in {string.Join(", ", _extensions[..^1])} or {_extensions[^1]}.");
+        }
+
+        if (Path.GetDirectoryName(Path.GetFullPath(file)) is { } folder && !Directory.Exists(folder))
+        {
+            throw new CommandException($"--out {file}: there is no folder {folder}.");
+        }
     }
 }
 
 /// <summary>Where results are to go.</summary>
 /// <param name="IsJson">As JSON on standard output instead of a table.</param>
-/// <param name="Picture">Path of the picture to write, if any.</param>
+/// <param name="Pictures">Paths of the pictures to write.</param>
+/// <param name="MeshFiles">Paths of the mesh files to write.</param>
 /// <param name="IsQuiet">No table and no cautions.</param>
-internal sealed record OutputRequest(bool IsJson, string? Picture, bool IsQuiet);
+internal sealed record OutputRequest(
+    bool IsJson, ImmutableArray<string> Pictures, ImmutableArray<string> MeshFiles, bool IsQuiet);

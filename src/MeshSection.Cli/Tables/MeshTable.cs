@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MeshSection.Cli.Inputs;
 using MeshSection.Meshing;
 using Spectre.Console;
@@ -11,21 +12,27 @@ internal static class MeshTable
     private const int MostListed = 12;
 
     /// <summary>Writes the table.</summary>
-    public static void Write(IAnsiConsole console, SectionInput input, FlatOutline flat, Mesh mesh)
+    public static void Write(IAnsiConsole console, SectionInput input, Mesh mesh, MeshReport report, TimeSpan time)
     {
         var lengths = new Lengths(input.Unit);
-        var quality = MeshQuality.Of(mesh);
         Heading.Write(console, input);
-        console.Write(Summary(input, flat, mesh, quality, lengths));
-        console.Write(Histogram(quality));
+        console.Write(Summary(input, mesh, report, time, lengths));
+        console.Write(Histogram(report.Quality));
+        if (!report.InputAngles.IsEmpty)
+        {
+            console.Write(InputAngles(input, report.InputAngles, lengths));
+        }
+
         if (!mesh.Unrefined.IsEmpty)
         {
             console.Write(Unrefined(input, mesh, lengths));
         }
     }
 
-    private static Table Summary(SectionInput input, FlatOutline flat, Mesh mesh, MeshQuality quality, Lengths lengths)
+    private static Table Summary(
+        SectionInput input, Mesh mesh, MeshReport report, TimeSpan time, Lengths lengths)
     {
+        var quality = report.Quality;
         var origin = input.Section.Outline.Origin;
         var size = input.Section.Outline.Bounds.Diagonal;
         var table = TableStyle.Columns("Mesh", "");
@@ -36,10 +43,18 @@ internal static class MeshTable
             "smallest angle", $"{Digits.Of(quality.SmallestAngle)}° at {lengths.Of(origin + quality.SmallestAnglePlace, size)}");
         table.AddRow("largest angle", $"{Digits.Of(quality.LargestAngle)}°");
         table.AddRow("largest triangle", $"{lengths.Of(quality.LargestArea, 2)} {lengths.Symbol(2)}");
+        if (report.ThinnestWall is { } wall)
+        {
+            table.AddRow(
+                "thinnest wall",
+                $"{lengths.Of(wall.Thickness)} {lengths.Symbol()} at {lengths.Of(origin + wall.From, size)}, {wall.Elements} {(wall.Elements == 1 ? "element" : "elements")} across");
+        }
+
         table.AddRow(
             "chords",
-            flat.MaxSag == 0 ? "no curves" : $"within {lengths.Of(flat.MaxSag)} {lengths.Symbol()} of their curves");
+            report.MaxSag == 0 ? "no curves" : $"within {lengths.Of(report.MaxSag)} {lengths.Symbol()} of their curves");
         table.AddRow("not refined", mesh.Unrefined.IsEmpty ? "none" : TableStyle.Number(mesh.Unrefined.Length));
+        table.AddRow("time", FormattableString.Invariant($"{Math.Ceiling(time.TotalMilliseconds):F0} ms"));
         return table;
     }
 
@@ -57,6 +72,23 @@ internal static class MeshTable
                     TableStyle.Number(count),
                     new string('#', (int)Math.Ceiling((double)BarWidth * count / most)));
             }
+        }
+
+        return table;
+    }
+
+    private static Table InputAngles(SectionInput input, ImmutableArray<InputAngle> angles, Lengths lengths)
+    {
+        var outline = input.Section.Outline;
+        var table = TableStyle.Columns("Sharp corners of the outline", "angle");
+        foreach (var angle in angles.Take(MostListed))
+        {
+            table.AddRow(lengths.Of(outline.Origin + angle.Place, outline.Bounds.Diagonal), Digits.Of(angle.Degrees) + "°");
+        }
+
+        if (angles.Length > MostListed)
+        {
+            table.AddRow($"and {angles.Length - MostListed} more", "");
         }
 
         return table;

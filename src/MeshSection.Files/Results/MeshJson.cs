@@ -14,20 +14,26 @@ public static class MeshJson
     /// <summary>Writes a document: one indented object and a line end.</summary>
     /// <param name="stream">Where to; left open.</param>
     /// <param name="mesh">The mesh, in local coordinates, with at least one triangle.</param>
+    /// <param name="report">The report on it.</param>
+    /// <param name="time">How long it took to make; null if that is not to be told.</param>
     /// <param name="origin">Where the local origin lies in the drawing's axes, mm.</param>
     /// <param name="unit">The unit of length to write in.</param>
-    public static void Write(Stream stream, Mesh mesh, Point origin, LengthUnit unit) =>
-        ResultWriter.Document(stream, json => Write(json, mesh, origin, unit));
+    public static void Write(
+        Stream stream, Mesh mesh, MeshReport report, TimeSpan? time, Point origin, LengthUnit unit) =>
+        ResultWriter.Document(stream, json => Write(json, mesh, report, time, origin, unit));
 
     /// <summary>Writes one object.</summary>
     /// <param name="json">Where to; at a place where an object may begin.</param>
     /// <param name="mesh">The mesh, in local coordinates, with at least one triangle.</param>
+    /// <param name="report">The report on it.</param>
+    /// <param name="time">How long it took to make; null if that is not to be told.</param>
     /// <param name="origin">Where the local origin lies in the drawing's axes, mm.</param>
     /// <param name="unit">The unit of length to write in.</param>
-    public static void Write(Utf8JsonWriter json, Mesh mesh, Point origin, LengthUnit unit)
+    public static void Write(
+        Utf8JsonWriter json, Mesh mesh, MeshReport report, TimeSpan? time, Point origin, LengthUnit unit)
     {
         var writer = new ResultWriter(json, unit);
-        var quality = MeshQuality.Of(mesh);
+        var quality = report.Quality;
         var regions = RegionAreas(mesh);
         json.WriteStartObject();
         writer.Units(unit);
@@ -37,6 +43,8 @@ public static class MeshJson
         writer.Point("minAnglePlace", origin + quality.SmallestAnglePlace);
         writer.Number("maxAngle", quality.LargestAngle);
         writer.Number("largestTriangle", quality.LargestArea, 2);
+        writer.Object("chords", () => writer.Number("maxSag", report.MaxSag, 1));
+        WriteWall(writer, report.ThinnestWall, origin);
         json.WriteStartArray("angleHistogram");
         foreach (var count in quality.AngleHistogram)
         {
@@ -54,6 +62,16 @@ public static class MeshJson
         }
 
         json.WriteEndArray();
+        json.WriteStartArray("inputAngles");
+        foreach (var angle in report.InputAngles)
+        {
+            json.WriteStartObject();
+            writer.Coordinates(origin + angle.Place);
+            writer.Number("angle", angle.Degrees);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
         json.WriteStartArray("unrefined");
         foreach (var triangle in mesh.Unrefined)
         {
@@ -66,7 +84,29 @@ public static class MeshJson
         }
 
         json.WriteEndArray();
+        if (time is { } taken)
+        {
+            json.WriteNumber("seconds", taken.TotalSeconds);
+        }
+
         json.WriteEndObject();
+    }
+
+    private static void WriteWall(ResultWriter writer, Wall? wall, Point origin)
+    {
+        if (wall is null)
+        {
+            writer.Json.WriteNull("thinnestWall");
+            return;
+        }
+
+        writer.Object("thinnestWall", () =>
+        {
+            writer.Number("thickness", wall.Thickness, 1);
+            writer.Json.WriteNumber("elements", wall.Elements);
+            writer.Point("from", origin + wall.From);
+            writer.Point("to", origin + wall.To);
+        });
     }
 
     private static double[] RegionAreas(Mesh mesh)

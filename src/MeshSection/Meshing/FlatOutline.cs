@@ -10,7 +10,7 @@ public sealed record Chord(Edge Curve, EdgePlace Place);
 
 /// <summary>An outline with its curves replaced by chords, ready to be meshed.</summary>
 /// <param name="Outline">The outline that was flattened.</param>
-/// <param name="Chords">Every chord of every boundary, boundary by boundary, in running order: chord i is segment i of the graph.</param>
-/// <param name="Graph">The chords as points and segments.</param>
+/// <param name="Chords">Every chord of every boundary, boundary by boundary, in running order: chord i is segment i of the graph, and lines to keep follow.</param>
+/// <param name="Graph">The chords, and what else the mesh is to keep, as points and segments.</param>
 /// <param name="MaxSag">The greatest distance of any chord from its curve, mm.</param>
 public sealed record FlatOutline(Outline Outline, ImmutableArray<Chord> Chords, PlanarGraph Graph, double MaxSag);

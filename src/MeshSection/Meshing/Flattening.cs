@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using MeshSection.Geometry;
 
 namespace MeshSection.Meshing;
@@ -15,58 +14,51 @@ public sealed record Flattening(double MaxSag, double MaxTurn = 15)
     public static Flattening For(Outline outline) => new(1e-4 * outline.Bounds.Diagonal);
 
     /// <summary>
-    /// Flattens an outline. Where chords of two curves would cross, as in a wall thinner than the sag, they are halved
-    /// until they do not.
+    /// Flattens an outline. Where chords of two curves would cross, as in a wall thinner than the sag, or one cuts off a
+    /// point that the mesh is to keep, they are halved until they do not.
     /// </summary>
-    public FlatOutline Apply(Outline outline)
+    /// <param name="outline">The outline.</param>
+    /// <param name="constraints">What the mesh is to keep besides; null for nothing.</param>
+    /// <exception cref="ConstraintException">The mesh cannot keep what it should.</exception>
+    public FlatOutline Apply(Outline outline, MeshConstraints? constraints = null)
     {
-        var steps = outline.Boundaries
-            .Select(b => b.Boundary.Edges.Select(e => (int)Math.Max(1, e.Steps(MaxSag, MaxTurn * Math.PI / 180))).ToArray())
-            .ToArray();
-        for (var round = 0; ; round++)
+        ArgumentNullException.ThrowIfNull(outline);
+        var cuts = outline.Boundaries.Select(b => b.Boundary.Edges.Select(Cuts).ToArray()).ToArray();
+        var flat = ChordChain.Of(outline, cuts);
+        for (var round = 0; round < MaxRounds; round++)
         {
-            var flat = Chords(outline, steps);
-            var crossed = ChordCrossings.Find(flat);
-            if (crossed.Count == 0 || round == MaxRounds)
+            var inTheWay = ChordCrossings.Find(flat);
+            if (inTheWay.Count == 0 && constraints is not null)
             {
-                return flat;
+                inTheWay = ConstraintPlaces.CutOff(flat, constraints);
             }
 
-            foreach (var place in crossed)
+            if (inTheWay.Count == 0)
             {
-                steps[place.Boundary][place.Edge] *= 2;
+                break;
             }
+
+            foreach (var place in inTheWay)
+            {
+                cuts[place.Boundary][place.Edge] = Halved(cuts[place.Boundary][place.Edge]);
+            }
+
+            flat = ChordChain.Of(outline, cuts);
         }
+
+        return constraints is null ? flat : ConstraintInsertion.Run(flat, cuts, constraints);
     }
 
-    private static FlatOutline Chords(Outline outline, int[][] steps)
+    /// <summary>The fractions of an edge's length at which its chords begin and end.</summary>
+    private double[] Cuts(Edge edge)
     {
-        var chords = ImmutableArray.CreateBuilder<Chord>();
-        var points = ImmutableArray.CreateBuilder<Point>();
-        var segments = ImmutableArray.CreateBuilder<Segment>();
-        var maxSag = 0.0;
-        for (var b = 0; b < outline.Boundaries.Length; b++)
-        {
-            var (boundary, region) = (outline.Boundaries[b].Boundary, outline.Boundaries[b].Region);
-            var first = points.Count;
-            for (var e = 0; e < boundary.Edges.Length; e++)
-            {
-                var edge = boundary.Edges[e];
-                var count = steps[b][e];
-                for (var i = 0; i < count; i++)
-                {
-                    var piece = count == 1 ? edge : edge.Part((double)i / count, (double)(i + 1) / count);
-                    maxSag = Math.Max(maxSag, piece.Sag);
-                    chords.Add(new Chord(piece, new EdgePlace(b, e)));
-                    points.Add(piece.Start);
-                    segments.Add(new Segment(points.Count - 1, points.Count, region, -1));
-                }
-            }
+        var steps = (int)Math.Max(1, edge.Steps(MaxSag, MaxTurn * Math.PI / 180));
+        return [.. Enumerable.Range(0, steps + 1).Select(i => (double)i / steps)];
+    }
 
-            segments[^1] = segments[^1] with { To = first };
-        }
-
-        return new FlatOutline(
-            outline, chords.ToImmutable(), new PlanarGraph(points.ToImmutable(), segments.ToImmutable()), maxSag);
+    private static double[] Halved(double[] cuts)
+    {
+        var steps = 2 * (cuts.Length - 1);
+        return [.. Enumerable.Range(0, steps + 1).Select(i => (double)i / steps)];
     }
 }

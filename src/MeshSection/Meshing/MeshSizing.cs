@@ -18,7 +18,7 @@ public static class MeshSizing
     private const int MaxTries = 5;
 
     /// <summary>Triangles in a refined mesh for each time that the largest one would fit into the area, about.</summary>
-    private const double TrianglesPerFit = 1.5;
+    private const double TrianglesPerFit = 1.57;
 
     /// <summary>
     /// Makes a mesh of as many triangles as wanted, to <see cref="CountTolerance"/>, all of about one size; of more only

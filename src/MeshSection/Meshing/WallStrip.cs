@@ -27,11 +27,11 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
     public bool IsFace(int e) =>
         mesh.Segments[e] >= 0 && (mesh.Neighbours[e] < 0 || mesh.Regions[mesh.Neighbours[e]] != mesh.Regions[e / 3]);
 
-    /// <summary>The least height at which a facing boundary lies above edge e; infinite if none does.</summary>
-    public double Thickness(int e)
+    /// <summary>The least height at which a facing boundary lies above edge e; the limit if none lies lower.</summary>
+    public double Thickness(int e, double limit = double.PositiveInfinity)
     {
         Enter(e);
-        return SweepToWall(out _);
+        return SweepToWall(limit, out _);
     }
 
     /// <summary>The triangles over edge e up to a height; valid until the next call.</summary>
@@ -46,7 +46,7 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
     public Wall WallAt(int e)
     {
         Enter(e);
-        double thickness = SweepToWall(out double place);
+        double thickness = SweepToWall(double.PositiveInfinity, out double place);
         Sweep(thickness);
         double elements = Math.Max(1, Math.Ceiling((1 - Rounding) * thickness / triangles.Max(LongestSide)));
         Point from = begin + place * along;
@@ -81,9 +81,9 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
     }
 
     /// <summary>The least height of a facing boundary, and its place, without a look at what lies higher.</summary>
-    private double SweepToWall(out double place)
+    private double SweepToWall(double limit, out double place)
     {
-        double lowest = double.PositiveInfinity;
+        double lowest = limit;
         place = 0;
         Begin();
         while (Next(out int t))

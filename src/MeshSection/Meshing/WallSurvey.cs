@@ -19,20 +19,35 @@ public sealed class WallSurvey
     private readonly ImmutableArray<int> edges;
     private readonly ImmutableArray<double> thicknesses;
 
-    private WallSurvey(
-        Mesh mesh, PlanarGraph graph, ImmutableArray<int> edges, ImmutableArray<double> thicknesses, Wall? thinnest)
+    private WallSurvey(Mesh mesh, PlanarGraph graph, ImmutableArray<int> edges, ImmutableArray<double> thicknesses)
     {
         this.mesh = mesh;
         this.graph = graph;
         this.edges = edges;
         this.thicknesses = thicknesses;
-        Thinnest = thinnest;
     }
 
-    /// <summary>The thinnest wall, the first of equals; null if there is none.</summary>
-    public Wall? Thinnest { get; }
+    /// <summary>The thinnest wall of a mesh, the first of equals; null if no boundaries face each other.</summary>
+    /// <param name="mesh">The mesh.</param>
+    /// <param name="graph">The graph that it covers.</param>
+    public static Wall? Thinnest(Mesh mesh, PlanarGraph graph)
+    {
+        ArgumentNullException.ThrowIfNull(mesh);
+        ArgumentNullException.ThrowIfNull(graph);
+        var strip = new WallStrip(mesh, graph);
+        double least = double.PositiveInfinity;
+        int thinnest = -1;
+        for (int e = 0; e < mesh.Segments.Length; e++)
+        {
+            if (!strip.IsFace(e)) continue;
+            double thickness = strip.Thickness(e, least);
+            if (thickness >= least) continue;
+            (least, thinnest) = (thickness, e);
+        }
+        return thinnest < 0 ? null : strip.WallAt(thinnest);
+    }
 
-    /// <summary>Surveys a mesh.</summary>
+    /// <summary>Surveys every wall of a mesh.</summary>
     /// <param name="mesh">The mesh.</param>
     /// <param name="graph">The graph that it covers.</param>
     public static WallSurvey Of(Mesh mesh, PlanarGraph graph)
@@ -42,8 +57,6 @@ public sealed class WallSurvey
         var strip = new WallStrip(mesh, graph);
         var edges = ImmutableArray.CreateBuilder<int>();
         var thicknesses = ImmutableArray.CreateBuilder<double>();
-        double least = double.PositiveInfinity;
-        int thinnest = -1;
         for (int e = 0; e < mesh.Segments.Length; e++)
         {
             if (!strip.IsFace(e)) continue;
@@ -51,10 +64,8 @@ public sealed class WallSurvey
             if (double.IsPositiveInfinity(thickness)) continue;
             edges.Add(e);
             thicknesses.Add(thickness);
-            if (thickness < least) (least, thinnest) = (thickness, e);
         }
-        return new WallSurvey(
-            mesh, graph, edges.ToImmutable(), thicknesses.ToImmutable(), thinnest < 0 ? null : strip.WallAt(thinnest));
+        return new WallSurvey(mesh, graph, edges.ToImmutable(), thicknesses.ToImmutable());
     }
 
     /// <summary>About how many triangles the walls take for a number of elements across every one.</summary>

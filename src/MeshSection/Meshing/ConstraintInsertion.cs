@@ -135,28 +135,30 @@ internal sealed class ConstraintInsertion
         }
     }
 
+    /// <summary>Makes sure that the piece of a line from node a to b lies within the section.</summary>
     private void RefuseBoundary(ConstraintLine line, int a, int b)
     {
+        var (from, to) = (points[a], points[b]);
+        Point? met = null;
         for (var i = 0; i < flat.Chords.Length; i++)
         {
             var s = segments[i];
-            var isAlong = (s.From == a && s.To == b) || (s.From == b && s.To == a);
-            var isApart = s.From == a || s.From == b || s.To == a || s.To == b;
-            if (isAlong)
+            if ((s.From == a && s.To == b) || (s.From == b && s.To == a))
             {
-                throw new ConstraintException(ConstraintFault.MeetsBoundary, 0.5 * (points[a] + points[b]), line);
+                throw new ConstraintException(ConstraintFault.MeetsBoundary, 0.5 * (from + to), line);
             }
 
-            if (!isApart && Crossing(points[a], points[b], points[s.From], points[s.To]) is { } place)
+            var isApart = s.From != a && s.From != b && s.To != a && s.To != b;
+            if (isApart && Crossing(from, to, points[s.From], points[s.To]) is { } place
+                && (met is null || place.DistanceTo(from) < met.Value.DistanceTo(from)))
             {
-                throw new ConstraintException(ConstraintFault.MeetsBoundary, place, line);
+                met = place;
             }
         }
 
-        var middle = 0.5 * (points[a] + points[b]);
-        if (!ConstraintPlaces.IsInside(flat.Outline, middle))
+        if (met is not null || !ConstraintPlaces.IsInside(flat.Outline, 0.5 * (from + to)))
         {
-            throw new ConstraintException(ConstraintFault.MeetsBoundary, middle, line);
+            throw new ConstraintException(ConstraintFault.MeetsBoundary, met ?? from, line);
         }
     }
 

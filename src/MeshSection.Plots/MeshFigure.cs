@@ -13,24 +13,27 @@ namespace MeshSection.Plots;
 public static class MeshFigure
 {
     private static readonly Stroke Leader = new(Palette.Orange, 2);
+    private static readonly Stroke WallStroke = new(Palette.Green, 4);
 
     /// <summary>Lays the picture out.</summary>
     /// <param name="section">The section that was meshed; its title heads the picture.</param>
     /// <param name="mesh">Its mesh.</param>
+    /// <param name="report">The report on the mesh.</param>
     /// <param name="unit">The unit for every number on the picture.</param>
     /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
     /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
-    public static Figure Of(Section section, Mesh mesh, LengthUnit unit, PictureSize? size = null)
+    public static Figure Of(Section section, Mesh mesh, MeshReport report, LengthUnit unit, PictureSize? size = null)
     {
         ArgumentNullException.ThrowIfNull(section);
         ArgumentNullException.ThrowIfNull(mesh);
+        ArgumentNullException.ThrowIfNull(report);
         ArgumentNullException.ThrowIfNull(unit);
         var outline = section.Outline;
-        var quality = MeshQuality.Of(mesh);
+        var quality = report.Quality;
 
         var sheet = new Sheet(size ?? PictureSize.Standard);
         Heading.Add(sheet, section.Title);
-        new Panel(Rows(mesh, quality, unit)).Add(sheet, area => View.ScaleFor(outline.Bounds, Inner(area)));
+        new Panel(Rows(mesh, report, unit)).Add(sheet, area => View.ScaleFor(outline.Bounds, Inner(area)));
         var view = View.Fit(outline.Bounds, Inner(sheet.Free));
         var lengths = new LengthScale(unit, Math.Max(outline.Bounds.Width, outline.Bounds.Height));
         ScaleBar.Add(sheet, view.Scale, unit, lengths.NoteOn(outline.Bounds));
@@ -40,6 +43,12 @@ public static class MeshFigure
         sheet.Add(new Area([MeshMarks.Triangle(mesh, view, quality.SmallestAngleTriangle)], Palette.Orange, Stroke.None));
         sheet.Add(MeshMarks.InnerEdges(mesh, view));
         sheet.Add(MeshMarks.OutlineEdges(mesh, view));
+        AddKept(sheet, mesh, report, view);
+        if (report.ThinnestWall is { } wall)
+        {
+            AddWall(sheet, view.Of(wall.From), view.Of(wall.To));
+        }
+
         AddSharpest(sheet, outline.Bounds, mesh, view, quality);
         return sheet.ToFigure();
     }
@@ -51,14 +60,28 @@ public static class MeshFigure
         return new Box(above.MinX + 130, above.MinY + 10, above.MaxX - 130, above.MaxY - 20);
     }
 
-    private static ImmutableArray<PanelRow> Rows(Mesh mesh, MeshQuality quality, LengthUnit unit)
+    private static ImmutableArray<PanelRow> Rows(Mesh mesh, MeshReport report, LengthUnit unit)
     {
+        var quality = report.Quality;
         var rows = ImmutableArray.CreateBuilder<PanelRow>();
         rows.Add(new ValueRow("Triangles", "", "", Numbers.Count(quality.Triangles)));
         rows.Add(new ValueRow("Nodes", "", "", Numbers.Count(quality.Nodes)));
         rows.Add(new ValueRow("Smallest angle", "", "", KeyValues.Angle(quality.SmallestAngle)));
         rows.Add(new ValueRow("Largest angle", "", "", KeyValues.Angle(quality.LargestAngle)));
         rows.Add(new ValueRow("Largest triangle", "", "", $"{Numbers.Format(unit.FromMillimetres(quality.LargestArea, 2))} {unit.SymbolOf(2)}"));
+        if (report.ThinnestWall is { } wall)
+        {
+            rows.Add(new ValueRow("Thinnest wall", "", "", $"{Numbers.Format(unit.FromMillimetres(wall.Thickness, 1))} {unit.SymbolOf(1)}"));
+            rows.Add(new LegendRow(
+                p => [new Polyline(WallStroke, new(p.X - 14, p.Y), new(p.X + 14, p.Y))],
+                wall.Elements == 1 ? "thinnest wall, 1 element across" : $"thinnest wall, {wall.Elements} elements across"));
+        }
+
+        if (!report.KeptPoints.IsEmpty)
+        {
+            rows.Add(new LegendRow(p => [new Polyline(MeshMarks.Kept, new(p.X - 20, p.Y), p), KeptSign(p)], "to be kept in the mesh"));
+        }
+
         rows.Add(new LegendRow(p => [new Disc(p, 11, OxyColors.Undefined, Leader)], "smallest angle"));
         foreach (var cause in mesh.Unrefined.GroupBy(u => u.Cause).OrderBy(g => g.Key))
         {
@@ -66,6 +89,25 @@ public static class MeshFigure
         }
 
         return rows.ToImmutable();
+    }
+
+    private static void AddKept(Sheet sheet, Mesh mesh, MeshReport report, View view)
+    {
+        sheet.Add(MeshMarks.KeptEdges(mesh, view));
+        foreach (var point in report.KeptPoints)
+        {
+            sheet.Add(KeptSign(view.Of(point)));
+        }
+    }
+
+    /// <summary>The way across a wall, with a sign that is seen however short it is.</summary>
+    private static void AddWall(Sheet sheet, ScreenPoint from, ScreenPoint to)
+    {
+        sheet.Add(new Polyline(WallStroke, from, to));
+        foreach (var end in new[] { from, to })
+        {
+            sheet.Add(new Disc(end, 5, Palette.Green, Stroke.None));
+        }
     }
 
     private static void AddUnrefined(Sheet sheet, Mesh mesh, View view)
@@ -105,6 +147,8 @@ public static class MeshFigure
             sheet.Add(label);
         }
     }
+
+    private static Disc KeptSign(ScreenPoint p) => new(p, 6, Palette.Blue, Stroke.None);
 
     private static Disc UnrefinedSign(ScreenPoint p) => new(p, 6, Palette.Blue, new Stroke(Palette.Paper, 1.5));
 

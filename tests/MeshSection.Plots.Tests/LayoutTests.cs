@@ -30,7 +30,7 @@ public class LayoutTests
         var sample = Hostile.Named(name);
         foreach (var size in Sizes)
         {
-            CheckLabels(MeshFigure.Of(sample.Section, sample.Mesh, LengthUnit.Millimetre, size));
+            CheckLabels(MeshFigure.Of(sample.Section, sample.Mesh, sample.Report, LengthUnit.Millimetre, size));
         }
     }
 

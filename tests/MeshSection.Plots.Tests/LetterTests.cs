@@ -24,7 +24,7 @@ public class LetterTests
         [
             .. Hostile.All.Select(h => h.Sample.Figure()),
             OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, []),
-            MeshFigure.Of(Sample.Angle().Section, Sample.Angle().Mesh, LengthUnit.Millimetre),
+            MeshFigure.Of(Sample.Angle().Section, Sample.Angle().Mesh, Sample.Angle().Report, LengthUnit.Millimetre),
         ];
         var letters = figures.SelectMany(f => f.Marks.OfType<Label>()).SelectMany(l => l.Text).Distinct().ToArray();
 

@@ -37,7 +37,7 @@ internal static class MeshCommand
         var report = MeshReport.Of(flat, mesh, meshRequest.MinAngle ?? new MeshSettings().MinAngle);
         foreach (var picture in output.Pictures)
         {
-            Picture.Save(MeshFigure.Of(input.Section, mesh, input.Unit), picture, terminal, output);
+            Picture.Save(MeshFigure.Of(input.Section, mesh, report, input.Unit), picture, terminal, output);
         }
 
         if (output.IsJson)

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using MeshSection.Geometry;
 
 namespace MeshSection.Meshing;
 
@@ -7,8 +8,13 @@ namespace MeshSection.Meshing;
 /// <param name="InputAngles">Angles of the outline itself below the smallest angle asked for: the mesh has to keep them.</param>
 /// <param name="ThinnestWall">The thinnest wall and how many elements lie across it; null if no boundaries face each other.</param>
 /// <param name="MaxSag">The greatest distance of any chord from its curve, mm.</param>
+/// <param name="KeptPoints">Points off the outline that the mesh was to keep, ends of lines included, mm.</param>
 public sealed record MeshReport(
-    MeshQuality Quality, ImmutableArray<InputAngle> InputAngles, Wall? ThinnestWall, double MaxSag)
+    MeshQuality Quality,
+    ImmutableArray<InputAngle> InputAngles,
+    Wall? ThinnestWall,
+    double MaxSag,
+    ImmutableArray<Point> KeptPoints)
 {
     /// <summary>Reports on a mesh.</summary>
     /// <param name="flat">The flattened outline.</param>
@@ -22,6 +28,7 @@ public sealed record MeshReport(
             MeshQuality.Of(mesh),
             Meshing.InputAngles.Below(flat.Graph, minAngle),
             WallSurvey.Thinnest(mesh, flat.Graph),
-            flat.MaxSag);
+            flat.MaxSag,
+            flat.Graph.Points[flat.Chords.Length..]);
     }
 }

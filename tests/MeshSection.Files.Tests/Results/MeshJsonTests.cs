@@ -23,7 +23,14 @@ public class MeshJsonTests
             new UnrefinedTriangle(2, new Point(2.54, 5.08), 14.5, UnrefinedCause.LeastEdge),
         ]);
 
-    private static readonly JsonNode Document = Written(new Point(254, -254));
+    private static readonly MeshReport Report = new(
+        MeshQuality.Of(Mesh),
+        [new InputAngle(0, new(0, 0), 20, 0, 1)],
+        new Wall(12.7, new(25.4, 0), new(25.4, 12.7), 3),
+        0.254,
+        []);
+
+    private static readonly JsonNode Document = Written(new Point(254, -254), Report, TimeSpan.FromSeconds(0.25));
 
     [Fact]
     public void Counts_and_angles()
@@ -61,10 +68,29 @@ public class MeshJsonTests
         Assert.Equal(14.5, JsonPaths.Number(unrefined[2], "angle"));
     }
 
-    private static JsonNode Written(Point origin)
+    [Fact]
+    public void The_thinnest_wall_and_the_sharp_corners()
+    {
+        Assert.Equal(0.5, JsonPaths.Number(Document, "thinnestWall.thickness"), 1e-12);
+        Assert.Equal(3, JsonPaths.Number(Document, "thinnestWall.elements"));
+        Assert.Equal(11, JsonPaths.Number(Document, "thinnestWall.from.x"), 1e-12);
+        Assert.Equal(-9.5, JsonPaths.Number(Document, "thinnestWall.to.y"), 1e-12);
+        var corner = Assert.Single(Document["inputAngles"]?.AsArray() ?? []);
+        Assert.Equal(20, JsonPaths.Number(corner, "angle"));
+        Assert.Equal(10, JsonPaths.Number(corner, "x"), 1e-12);
+        Assert.Equal(0.01, JsonPaths.Number(Document, "chords.maxSag"), 1e-12);
+        Assert.Equal(0.25, JsonPaths.Number(Document, "seconds"));
+
+        JsonNode plain = Written(default, Report with { ThinnestWall = null }, null);
+        Assert.Null(plain["thinnestWall"]);
+        Assert.True(plain.AsObject().ContainsKey("thinnestWall"));
+        Assert.False(plain.AsObject().ContainsKey("seconds"));
+    }
+
+    private static JsonNode Written(Point origin, MeshReport report, TimeSpan? time)
     {
         using var stream = new MemoryStream();
-        MeshJson.Write(stream, Mesh, origin, LengthUnit.Inch);
+        MeshJson.Write(stream, Mesh, report, time, origin, LengthUnit.Inch);
         return JsonNode.Parse(Encoding.UTF8.GetString(stream.ToArray())) ?? throw new InvalidOperationException();
     }
 }

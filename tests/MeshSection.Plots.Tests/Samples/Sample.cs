@@ -13,6 +13,10 @@ internal sealed record Sample(Section Section, Mesh Mesh, SectionProperties Prop
     public Figure Figure(PictureSize? size = null, LengthUnit? unit = null) =>
         SectionFigure.Of(Section, Mesh, Properties, unit ?? LengthUnit.Millimetre, size);
 
+    /// <summary>A report on the mesh, with a wall of 3 and two points that were to be kept.</summary>
+    public MeshReport Report => new(
+        MeshQuality.Of(Mesh), [], new Wall(3, Mesh.Nodes[0], Mesh.Nodes[1], 2), 0, [Mesh.Nodes[2], Mesh.Nodes[3]]);
+
     public Sample Titled(string title) => this with { Section = Section with { Title = title } };
 
     /// <summary>Corners on the lines of a grid; loops inside others are holes.</summary>

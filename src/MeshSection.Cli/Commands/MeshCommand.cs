@@ -17,18 +17,23 @@ internal static class MeshCommand
 
     public static Command Create(Terminal terminal)
     {
-        var (input, mesh, detail, output) = (new InputOptions(), new MeshOptions(), new MeshDetailOptions(), new OutputOptions());
+        var (input, mesh, detail, output) = (new InputOptions(), new MeshOptions(), new MeshDetailOptions(), new OutputOptions(MeshOutput.Extensions));
         var command = new Command("mesh", "Mesh a section, show the quality of the mesh, and write it for other programs.");
         input.AddTo(command);
         mesh.AddTo(command);
         detail.AddTo(command);
         output.AddTo(command);
         command.SetAction(parsed => Run(
-            terminal, input.Of(parsed), mesh.Of(parsed) with { Detail = detail.Of(parsed) }, output.Of(parsed)));
+            terminal,
+            input.Of(parsed),
+            mesh.Of(parsed) with { Detail = detail.Of(parsed) },
+            output.Of(parsed),
+            detail.IsSecondOrder(parsed)));
         return command;
     }
 
-    private static int Run(Terminal terminal, InputRequest request, MeshRequest meshRequest, OutputRequest output)
+    private static int Run(
+        Terminal terminal, InputRequest request, MeshRequest meshRequest, OutputRequest output, bool isSecondOrder)
     {
         var input = SectionInput.Read(request);
         var started = Stopwatch.GetTimestamp();
@@ -38,6 +43,11 @@ internal static class MeshCommand
         foreach (var picture in output.Pictures)
         {
             Picture.Save(MeshFigure.Of(input.Section, mesh, report, input.Unit), picture, terminal, output);
+        }
+
+        if (!output.MeshFiles.IsEmpty)
+        {
+            MeshOutput.Save(flat, mesh, isSecondOrder, input.Unit, terminal, output);
         }
 
         if (output.IsJson)

@@ -32,6 +32,12 @@ internal sealed class MeshDetailOptions
         HelpName = "NUMBER=LENGTH",
     };
 
+    private readonly Option<string?> _order = new("--order")
+    {
+        Description = "Triangles in mesh files: 1 with three nodes, 2 with six, those along the outline on the true curves [default: 1]",
+        HelpName = "1|2",
+    };
+
     /// <summary>Adds the options to a command.</summary>
     public void AddTo(Command command)
     {
@@ -39,6 +45,7 @@ internal sealed class MeshDetailOptions
         command.Add(_lines);
         command.Add(_sizes);
         command.Add(_regionSizes);
+        command.Add(_order);
     }
 
     /// <summary>What the command line asks for.</summary>
@@ -48,6 +55,15 @@ internal sealed class MeshDetailOptions
         Numbers(parsed, _lines, 4, "0,20,120,20"),
         [.. Numbers(parsed, _sizes, 3, "120,35.5,0.5").Select(WithSide)],
         [.. (parsed.GetValue(_regionSizes) ?? []).Select(RegionSize)]);
+
+    /// <summary>True if mesh files are to have triangles of second order.</summary>
+    /// <exception cref="CommandException">The order is neither 1 nor 2.</exception>
+    public bool IsSecondOrder(ParseResult parsed) => parsed.GetValue(_order) switch
+    {
+        null or "1" => false,
+        "2" => true,
+        var text => throw new CommandException($"--order {text}: expected 1 or 2."),
+    };
 
     private static ImmutableArray<double[]> Numbers(ParseResult parsed, Option<string[]> option, int count, string example) =>
         [.. (parsed.GetValue(option) ?? []).Select(text => GivenPoint.Numbers(text, option.Name, count, example))];

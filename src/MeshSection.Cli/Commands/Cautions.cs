@@ -1,9 +1,10 @@
 using MeshSection.Cli.Inputs;
 using MeshSection.Cli.Options;
+using MeshSection.Meshing;
 
 namespace MeshSection.Cli.Commands;
 
-/// <summary>Tells on standard error what a person should know about how the drawing was understood.</summary>
+/// <summary>Tells on standard error what a person should know about how the drawing was understood, and of the mesh.</summary>
 internal static class Cautions
 {
     /// <summary>Writes repairs and cautions, a line each.</summary>
@@ -17,6 +18,28 @@ internal static class Cautions
         foreach (var note in drawing.Report.Repairs.Concat(drawing.Report.Cautions))
         {
             terminal.Error.WriteLine($"{note.Name}: {note.Message}");
+        }
+    }
+
+    /// <summary>Writes what to know of a mesh, a line each.</summary>
+    public static void Write(Terminal terminal, MeshRequest request, Mesh mesh, OutputRequest output)
+    {
+        if (output.IsQuiet)
+        {
+            return;
+        }
+
+        if (request.MinAngle > MeshRequest.ProvenMinAngle)
+        {
+            terminal.Error.WriteLine(FormattableString.Invariant(
+                $"caution: --min-angle {request.MinAngle}: refinement is proven to end for up to {MeshRequest.ProvenMinAngle} degrees. Above, it may end at its limit of nodes, with smaller angles left."));
+        }
+
+        var left = mesh.Unrefined.Count(u => u.Cause == UnrefinedCause.NodeLimit);
+        if (left > 0)
+        {
+            terminal.Error.WriteLine(FormattableString.Invariant(
+                $"caution: the mesh ended at its limit of {mesh.Nodes.Length} nodes, with {left} triangles left below what was asked for; 'meshsection mesh' lists them. A wall far thinner than it is long takes that many: leave it out of the drawing, or ask for a smaller --min-angle."));
         }
     }
 }

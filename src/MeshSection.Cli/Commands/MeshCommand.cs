@@ -60,6 +60,7 @@ internal static class MeshCommand
         }
 
         Cautions.Write(terminal, input, output);
+        Cautions.Write(terminal, meshRequest, mesh, output);
         return ExitStatus.Done;
     }
 }

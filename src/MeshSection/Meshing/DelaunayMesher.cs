@@ -64,7 +64,7 @@ public sealed class DelaunayMesher : IMesher
         Check(mesh, graph, sides);
 
         Triangulation opened = MeshReopening.Run(mesh, graph);
-        var refiner = new Refiner(opened, graph, settings, new SizeMap(mesh, sides));
+        var refiner = new Refiner(opened, graph, settings, new SizeMap(opened, mesh, sides));
         refiner.Run(cancellation);
         return MeshNumbering.Run(opened, mesh.Nodes, refiner);
     }

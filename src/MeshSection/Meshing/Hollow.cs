@@ -7,6 +7,9 @@ namespace MeshSection.Meshing;
 /// </summary>
 internal sealed class Hollow(Triangulation mesh)
 {
+    /// <summary>Vertices from which on the hollow is triangulated as an outline of its own.</summary>
+    private const int LongChain = 200;
+
     private readonly List<int> vertices = [];
     private readonly List<int> edges = [];
     private readonly List<int> beyond = [];
@@ -62,6 +65,17 @@ internal sealed class Hollow(Triangulation mesh)
     /// <summary>Fills the hollow with triangles from the list, from its end, and returns the edge along the base.</summary>
     public int Fill(List<int> triangles, int[] starts)
     {
+        int baseEdge = vertices.Count > LongChain ? FillByItself(triangles, starts) : FillByApexes(triangles, starts);
+        for (int i = 0; i < filled.Count; i++)
+        {
+            mesh.Link(filled[i], beyond[i] >= 0 ? beyond[i] : filled[~beyond[i]]);
+            mesh.Segments[filled[i]] = marks[i];
+        }
+        return baseEdge;
+    }
+
+    private int FillByApexes(List<int> triangles, int[] starts)
+    {
         int baseEdge = -1;
         pending.Clear();
         pending.Add((0, vertices.Count - 1, -1));
@@ -75,26 +89,56 @@ internal sealed class Hollow(Triangulation mesh)
                 continue;
             }
             int apex = Apex(first, last);
-            int t = triangles[^1];
-            triangles.RemoveAt(triangles.Count - 1);
-            int b = 4 * t;
-            mesh.SetCorners(t, vertices[apex], vertices[first], vertices[last]);
-            for (int e = b; e < b + 3; e++)
-            {
-                mesh.Segments[e] = -1;
-                starts[mesh.Corners[e]] = e;
-            }
+            int b = 4 * Take(triangles, vertices[apex], vertices[first], vertices[last], starts);
             if (parent < 0) baseEdge = b;
             else mesh.Link(b, parent);
             pending.Add((first, apex, b + 2));
             pending.Add((apex, last, b + 1));
         }
-        for (int i = 0; i < filled.Count; i++)
+        return baseEdge;
+    }
+
+    private int FillByItself(List<int> triangles, int[] starts)
+    {
+        HollowTriangulation hollow = HollowTriangulation.Of(mesh, vertices);
+        Triangulation filling = hollow.Filling;
+        var places = new int[filling.TriangleCount];
+        for (int t = 0; t < places.Length; t++)
         {
-            mesh.Link(filled[i], beyond[i] >= 0 ? beyond[i] : filled[~beyond[i]]);
-            mesh.Segments[filled[i]] = marks[i];
+            places[t] = Take(
+                triangles,
+                hollow.Vertex(filling.Corners[4 * t]),
+                hollow.Vertex(filling.Corners[4 * t + 1]),
+                hollow.Vertex(filling.Corners[4 * t + 2]),
+                starts);
+        }
+        int baseEdge = -1;
+        for (int t = 0; t < places.Length; t++)
+        {
+            for (int k = 0; k < 3; k++)
+            {
+                int e = 4 * t + k;
+                int to = 4 * places[t] + k;
+                if (filling.Segments[e] < 0) mesh.Twins[to] = 4 * places[filling.Twins[e] >> 2] + (filling.Twins[e] & 3);
+                else if (hollow.Place(e) is int place and >= 0) filled[place] = to;
+                else baseEdge = to;
+            }
         }
         return baseEdge;
+    }
+
+    /// <summary>Takes the last triangle of the list for three corners.</summary>
+    private int Take(List<int> triangles, int a, int b, int c, int[] starts)
+    {
+        int t = triangles[^1];
+        triangles.RemoveAt(triangles.Count - 1);
+        mesh.SetCorners(t, a, b, c);
+        for (int e = 4 * t; e < 4 * t + 3; e++)
+        {
+            mesh.Segments[e] = -1;
+            starts[mesh.Corners[e]] = e;
+        }
+        return t;
     }
 
     private int Apex(int first, int last)

@@ -202,15 +202,14 @@ internal sealed class Refiner
             if (Split(blocking)) PushAgain(t);
             return;
         }
-        int near = mesh.Corners[4 * t];
-        cavity.Fill(AddVertex(place, -1, near));
+        cavity.Fill(AddVertex(place, -1, t));
         for (int i = 0; i < cavity.RimCount; i++) Examine(cavity.Triangle(i));
     }
 
-    private int AddVertex(Point place, int home, int near)
+    private int AddVertex(Point place, int home, int t)
     {
         int v = mesh.AddVertex(place.X, place.Y, home);
-        map?.Add(v, place, near);
+        map?.Add(v, place, t);
         return v;
     }
 
@@ -285,7 +284,7 @@ internal sealed class Refiner
         int f = mesh.Twins[e];
         if (!IsBetween(e, place) || (f >= 0 && !IsBetween(f, place))) return false;
 
-        int first = mesh.SplitEdge(e, AddVertex(place, s, u));
+        int first = mesh.SplitEdge(e, AddVertex(place, s, e >> 2));
         int around = first;
         do
         {

@@ -25,7 +25,7 @@ internal sealed class WantedSides(Triangulation mesh, MeshSettings settings, Siz
         {
             Point centre = mesh.CentreOf(t);
             if (field is not null) side = Math.Min(side, field.At(centre));
-            if (map is not null) side = Math.Min(side, map.At(centre, mesh.Corners[4 * t]));
+            if (map is not null) side = Math.Min(side, map.At(centre, t));
         }
         return side * side;
     }

@@ -55,7 +55,102 @@ internal static class HostileGraphs
             Polygon(1e-98, -3e-120, 100, 1e-200, 100, 100, -1e-310, 100), Hole(Circle(50, 1e-5, 1e-6, 8))),
         ["needle"] = Graphs.Of(Polygon(0, 0, 1e6, 0.5, 1e6, 1)),
         ["star of thin spikes"] = Star(36, 1, 100),
+        ["line along rows of points"] = Rows(300),
+        ["line across a disc of 2000 corners"] = new Graphs().Loop(Circle(0, 0, 100, 2000), 0, -1)
+            .Line(Circle(0, 0, 100, 2000)[0], Circle(0, 0, 100, 2000)[1000], 0, 0).Build(),
+        ["line under hanging teeth"] = Teeth(400),
+        // A small figure between two long segments at a small angle, by its apex: the angles across from the corner must
+        // be small ones, whatever the method [Shewchuk2002, section on small input angles].
+        ["square between the arms of 1 degree"] = new Graphs()
+            .Loop(Polygon(-10, -10, 110, -10, 110, 30, -10, 30), 0, -1)
+            .Line(Point.Origin, new(100, 0), 0, 0).Line(Point.Origin, 100 * Point.Direction(Math.PI / 180), 0, 0)
+            .Loop(Hole(Rectangle(1, 0.007, 0.004, 0.004)), 0, -1).Build(),
+        ["stray vertex a millionth from a corner"] = new Graphs()
+            .Loop(Rectangle(0, 0, 100, 100), 0, -1).Dot(new(1e-4, 1e-4)).Dot(new(100 - 1e-6, 1e-7)).Build(),
+        // Segments under 60 degrees of unequal lengths split each other in turn, unless on shells [Ruppert1995].
+        ["fan of 44 degrees with lengths in the golden section"] = GoldenFan(),
+        ["spiral arm"] = Spiral(),
+        ["nested triangles on one corner"] = Nested(12),
+        ["grid of 400 holes"] = Holes(20),
+        ["square of a thousandth at 1e9"] = Moved(
+            Graphs.Of(Rectangle(0, 0, 1, 1), Hole(Rectangle(0.25, 0.25, 0.5, 0.5))), 1e-3, 0, new Point(1e9, -1e9)),
+        ["points where circumcentres would come"] = Circumcentres(),
     };
+
+    /// <summary>Points in rows that draw near to a line from one end of it to the other.</summary>
+    private static PlanarGraph Rows(int n)
+    {
+        var graph = new Graphs().Loop(Rectangle(-50, -50, 1100, 100), 0, -1);
+        for (int i = 1; i <= n; i++)
+        {
+            double x = 1000.0 * i / (n + 1);
+            graph.Dot(new(x, 1e-2 * x)).Dot(new(x + 1, -0.05));
+        }
+        return graph.Line(Point.Origin, new(1000, 0), 0, 0).Build();
+    }
+
+    /// <summary>Lines that hang from a face down to a line that lies close below their ends.</summary>
+    private static PlanarGraph Teeth(int n)
+    {
+        var graph = new Graphs().Loop(Rectangle(0, 0, n, 60), 0, -1);
+        for (int i = 1; i < n; i++) graph.Line(new(i, 50), new(i + 0.01 * (i % 7), 20 + i % 3), 0, 0).Dot(new(i + 0.5, 10));
+        return graph.Line(new(0.25, 15), new(n - 0.25, 15.5), 0, 0).Build();
+    }
+
+    private static PlanarGraph GoldenFan()
+    {
+        var graph = new Graphs().Loop(Circle(0, 0, 150, 40), 0, -1);
+        for (int i = 0; i < 8; i++)
+        {
+            graph.Line(Point.Origin, 100 * Math.Pow(0.6180339887, i) * Point.Direction(i * 44 * Math.PI / 180), 0, 0);
+        }
+        return graph.Build();
+    }
+
+    private static PlanarGraph Spiral()
+    {
+        Point[] middle = [.. Enumerable.Range(0, 400).Select(i => (5 + 0.2 * i) * Point.Direction(0.1 * i))];
+        Point[] inside = [.. Enumerable.Range(0, 400).Select(i => (4 + 0.2 * i) * Point.Direction(0.1 * i))];
+        return Graphs.Of([.. middle, .. inside.Reverse()]);
+    }
+
+    private static PlanarGraph Nested(int count)
+    {
+        var graph = new Graphs().Loop(Polygon(0, 0, 200, -60, 200, 60), 0, -1);
+        for (int i = 0; i < count; i++)
+        {
+            double x = 150 * Math.Pow(0.7, i);
+            double y = 0.25 * x * Math.Pow(0.8, i);
+            graph.Line(Point.Origin, new(x, y), 0, 0).Line(new(x, y), new(x, -y), 0, 0).Line(new(x, -y), Point.Origin, 0, 0);
+        }
+        return graph.Build();
+    }
+
+    private static PlanarGraph Holes(int n)
+    {
+        var graph = new Graphs().Loop(Rectangle(0, 0, 10 * n, 10 * n), 0, -1);
+        for (int i = 0; i < n * n; i++)
+        {
+            graph.Loop(Hole(Circle(10 * (i % n) + 5, 10 * (i / n) + 5, 1 + 3.9 * (i % 7) / 7.0, 8)), 0, -1);
+        }
+        return graph.Build();
+    }
+
+    /// <summary>Equilateral triangles with their centres as points: every circle has more on it, or at its middle.</summary>
+    private static PlanarGraph Circumcentres()
+    {
+        var graph = new Graphs().Loop(Rectangle(-10, -10, 80, 80), 0, -1);
+        double row = Math.Sqrt(3) / 2;
+        for (int i = 0; i < 12; i++)
+        {
+            for (int j = 0; j < 12; j++)
+            {
+                Point corner = new(4 * i + 2 * (j % 2), 4 * row * j);
+                graph.Dot(corner).Dot(corner + new Point(2, 4 * row / 3));
+            }
+        }
+        return graph.Build();
+    }
 
     private static PlanarGraph Plate()
     {

@@ -47,8 +47,60 @@ public class RandomOutlineTests
                 DelaunayMesherTests.AssertQuality(mesh, settings.MinAngle);
                 Assert.True(MeshQuality.Of(mesh).LargestArea <= settings.MaxArea);
             },
-            iter: 300,
+            iter: 3500,
             threads: 1);
+
+    /// <summary>
+    /// Triangles of a lattice, each of one of three regions or of none, with some more lines and points between: holes,
+    /// islands, pieces that touch in corners, and collinear and cocircular points everywhere, exactly.
+    /// </summary>
+    [Fact]
+    public void Random_pieces_of_a_lattice_are_covered_soundly_and_finely() =>
+        Gen.Select(Lattice, Settings).Sample(
+            (graph, settings) =>
+            {
+                Mesh mesh = DelaunayMesherTests.Sound(graph, settings with { MaxArea = settings.MaxArea * 1000 });
+                if (mesh.Nodes.Length < settings.MaxNodes) DelaunayMesherTests.AssertQuality(mesh, settings.MinAngle);
+            },
+            iter: 2500,
+            threads: 1);
+
+    private static readonly Gen<PlanarGraph> Lattice =
+        from columns in Gen.Int[1, 6]
+        from rows in Gen.Int[1, 6]
+        from regions in Gen.Int[-1, 2].Array[2 * columns * rows]
+        from isKept in Gen.Int[0, 9].Array[3 * (columns + 1) * (rows + 1)]
+        from skew in Gen.Int[-2, 2]
+        from flatness in Gen.Int[0, 12]
+        select Pieces(columns, rows, regions, isKept, new Point(1, 0), new Point(skew, Math.ScaleB(1, -flatness)));
+
+    private static PlanarGraph Pieces(int columns, int rows, int[] regions, int[] isKept, Point right, Point up)
+    {
+        var graph = new Graphs();
+        for (int i = 0; i <= columns; i++)
+        {
+            for (int j = 0; j <= rows; j++)
+            {
+                int kept = 3 * (i * (rows + 1) + j);
+                if (i < columns) Line(i, j, i + 1, j, Region(i, j, 0), Region(i, j - 1, 1), isKept[kept]);
+                if (j < rows) Line(i, j, i, j + 1, Region(i - 1, j, 1), Region(i, j, 0), isKept[kept + 1]);
+                if (i < columns && j < rows) Line(i + 1, j, i, j + 1, Region(i, j, 0), Region(i, j, 1), isKept[kept + 2]);
+                if (isKept[kept] == 1) graph.Dot(Place(i, j));
+            }
+        }
+        return graph.Build();
+
+        // Half 0 of a cell is the one at its lower left, half 1 at its upper right.
+        int Region(int i, int j, int half) =>
+            i < 0 || j < 0 || i >= columns || j >= rows ? -1 : regions[2 * (i * rows + j) + half];
+
+        Point Place(int i, int j) => i * right + j * up;
+
+        void Line(int i, int j, int k, int l, int left, int rightOf, int kept)
+        {
+            if (left != rightOf || kept == 0) graph.Line(Place(i, j), Place(k, l), left, rightOf);
+        }
+    }
 
     private static PlanarGraph Build(
         Point[] outer, Point[][] inner, int[] region, double[] size, double scale, double angle, double far)

@@ -4,12 +4,12 @@ using MeshSection.Geometry;
 namespace MeshSection.Meshing;
 
 /// <summary>
-/// Checks the area of each region's triangles against the area within its segments by Green's theorem, to 1e-12 and what
+/// Checks the area of each region's triangles against the area within its segments by Green's theorem, to 1e-13 and what
 /// the digits of the coordinates lose along the segments.
 /// </summary>
 internal static class AreaCheck
 {
-    private const double Relative = 1e-12;
+    private const double Relative = 1e-13;
 
     public static void AddFaults(Mesh mesh, PlanarGraph graph, ImmutableArray<MeshFault>.Builder faults)
     {

@@ -85,12 +85,15 @@ internal sealed class PointInsertion
         last = cavity.Triangle(i);
     }
 
-    /// <summary>The triangle that holds the point, or a ghost beyond whose edge it lies.</summary>
+    /// <summary>
+    /// The triangle that holds the point, or a ghost beyond whose edge it lies. In a Delaunay triangulation no walk comes
+    /// by a triangle twice [DevillersPionTeillaud2002].
+    /// </summary>
     private int Locate(double x, double y)
     {
         int entered = -1;
         int b = 4 * last;
-        while (true)
+        for (int step = 0; step <= mesh.TriangleCount; step++)
         {
             int exit = -1;
             for (int e = b; e < b + 3 && exit < 0; e++)
@@ -102,6 +105,7 @@ internal sealed class PointInsertion
             b = entered & ~3;
             if (IsGhost(b >> 2)) return b >> 2;
         }
+        throw new InvalidOperationException("A walk through the triangulation does not end: the signs are not exact.");
     }
 
     private bool IsRightOf(int e, double x, double y)

@@ -15,7 +15,8 @@ internal static class Help
         ("outline", "meshsection outline dxf-samples/gate-post.dxf --layer SECTION --tolerance \"0.05 mm\"", "one layer only; ends up to 0.05 mm apart are joined"),
         ("outline", "meshsection outline dxf-samples/runway-tee.dxf --unit in", "a drawing that does not say its unit, or says it wrongly"),
         ("mesh", "meshsection mesh dxf-samples/pontoon-deck.dxf --elements 5000 --out pontoon-mesh.png", "about 5000 triangles"),
-        ("mesh", "meshsection mesh dxf-samples/winch-shaft.dxf --element-size 2mm --min-angle 30", "sides of at most about 2 mm"),
+        ("mesh", "meshsection mesh dxf-samples/winch-shaft.dxf --element-size 2mm --min-angle 30", "no side longer than 2 mm"),
+        ("mesh", "meshsection mesh dxf-samples/deck-plank.dxf --across 3 --order 2 --out deck-plank.vtu", "three elements across every wall; for other programs"),
         ("completion", "source <(meshsection completion bash)", "completion in this shell"),
     ];
 

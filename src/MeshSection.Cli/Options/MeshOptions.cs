@@ -9,7 +9,7 @@ internal sealed class MeshOptions
 {
     private readonly Option<string?> _elements = new("--elements")
     {
-        Description = "About how many triangles to make [default: 1000; more where the outline needs them]",
+        Description = "How many triangles to make, to 2 % [default: 1000; more where the outline needs them]",
         HelpName = "COUNT",
     };
 

@@ -16,20 +16,28 @@ public class DocumentedCommandsTests
     {
         using var folder = new TemporaryFolder();
         var words = Words(line);
-        var output = words.IndexOf("--out");
-        if (output >= 0)
+        int[] files = [.. Enumerable.Range(0, words.Count).Where(i => i > 0 && words[i - 1] == "--out")];
+        foreach (var i in files)
         {
-            words[output + 1] = folder.PathOf(words[output + 1]);
+            words[i] = folder.PathOf(words[i]);
         }
 
         var run = CommandRun.Of(Repository.Resolve(words));
         Assert.True(run.Status == 0, run.Error);
-        if (output >= 0)
+        Assert.All(files, i => AssertWritten(words[i]));
+    }
+
+    private static void AssertWritten(string path)
+    {
+        if (!path.EndsWith(".png", StringComparison.Ordinal))
         {
-            var png = File.ReadAllBytes(words[output + 1]);
-            Assert.Equal([0x89, (byte)'P', (byte)'N', (byte)'G'], png[..4]);
-            Assert.Equal((1600, 1200), ((png[18] << 8) + png[19], (png[22] << 8) + png[23]));
+            Assert.StartsWith(path.EndsWith(".vtu", StringComparison.Ordinal) ? "<?xml" : "$MeshFormat", File.ReadAllText(path), StringComparison.Ordinal);
+            return;
         }
+
+        var png = File.ReadAllBytes(path);
+        Assert.Equal([0x89, (byte)'P', (byte)'N', (byte)'G'], png[..4]);
+        Assert.Equal((1600, 1200), ((png[18] << 8) + png[19], (png[22] << 8) + png[23]));
     }
 
     [Fact]

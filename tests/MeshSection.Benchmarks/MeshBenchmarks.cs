@@ -9,6 +9,7 @@ namespace MeshSection.Benchmarks;
 /// tells how far the mesher stays n log n, on any machine.
 /// </summary>
 [MemoryDiagnoser]
+[Config(typeof(PerTriangle))]
 public class MeshBenchmarks
 {
     /// <summary>Triangles that the area would hold at the largest size, for one triangle of the mesh.</summary>
@@ -27,13 +28,19 @@ public class MeshBenchmarks
     [GlobalSetup]
     public void Prepare()
     {
-        (graph, double area) = Outlines.Named(Outline);
-        settings = new MeshSettings { MinAngle = 30, MaxArea = area / (FitsPerTriangle * Triangles) };
+        Ask();
         int count = Mesh();
         var random = new Random(1);
         unsorted = new double[count];
         for (int i = 0; i < count; i++) unsorted[i] = random.NextDouble();
-        Console.WriteLine($"// {Outline}: {count} triangles");
+    }
+
+    /// <summary>How many triangles are made; about what is asked for, or more where the outline needs them.</summary>
+    public static int Count(string outline, int triangles)
+    {
+        var benchmark = new MeshBenchmarks { Outline = outline, Triangles = triangles };
+        benchmark.Ask();
+        return benchmark.Mesh();
     }
 
     [Benchmark(Baseline = true)]
@@ -46,6 +53,12 @@ public class MeshBenchmarks
 
     [Benchmark]
     public int Mesh() => new DelaunayMesher().Triangulate(graph, settings).TriangleCount;
+
+    private void Ask()
+    {
+        (graph, double area) = Outlines.Named(Outline);
+        settings = new MeshSettings { MinAngle = 30, MaxArea = area / (FitsPerTriangle * Triangles) };
+    }
 
     private static class Outlines
     {

@@ -1,4 +1,5 @@
 using System.Text.Json;
+using MeshSection.Cli.Inputs;
 
 namespace MeshSection.Cli.Tests;
 
@@ -98,6 +99,14 @@ public class MeshCommandTests
         Assert.Equal(0, run.Status);
         Assert.Contains("limit of", run.Error, StringComparison.Ordinal);
         Assert.Contains("thinner than it is long", run.Error, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void What_memory_cannot_hold_is_refused_before_the_work()
+    {
+        new MemoryNeed(400).Check(1000, "--elements 1000", "Give fewer.");
+        var fault = Assert.Throws<CommandException>(() => new MemoryNeed(1e12).Check(1e6, "--elements 1000000", "Give fewer."));
+        Assert.Matches(@"^--elements 1000000: about 1E\+06 triangles would take 931322574\.6 GB of memory, and this process may use \d+\.\d GB\. Give fewer\.$", fault.Message);
     }
 
     private static JsonElement Json(string drawing, params string[] options)

@@ -22,6 +22,9 @@ public static class MshWriter
         text.WriteLine("$MeshFormat");
         text.WriteLine("2.2 0 8");
         text.WriteLine("$EndMeshFormat");
+        text.WriteLine("$Comments");
+        text.WriteLine($"Coordinates in {mesh.Unit.Symbol}.");
+        text.WriteLine("$EndComments");
         WriteNames(text, mesh);
         WriteNodes(text, mesh);
         WriteElements(text, mesh);

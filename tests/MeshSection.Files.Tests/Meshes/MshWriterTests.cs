@@ -16,6 +16,7 @@ public class MshWriterTests
         Assert.DoesNotContain('\r', text);
         var sections = Sections(text);
         Assert.Equal(["2.2 0 8"], sections["MeshFormat"]);
+        Assert.Equal(["Coordinates in in."], sections["Comments"]);
         Assert.Equal(
             ["4", "1 1 \"boundary 1\"", "1 2 \"boundary 2\"", "1 3 \"line\"", "2 1 \"region 1\""], sections["PhysicalNames"]);
 

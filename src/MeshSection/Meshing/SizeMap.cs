@@ -28,7 +28,7 @@ internal sealed class SizeMap
     }
 
     /// <summary>The longest side wanted at a place that triangle t sees from all its corners, mm.</summary>
-    public double At(Point place, int t) => sides[Find(place, t)];
+    public double At(Point place, int t) => sides[IsKept(t) ? t : Find(place, t)];
 
     /// <summary>Makes the place of a new vertex known, which triangle t sees from all its corners.</summary>
     public void Add(int vertex, Point place, int t)
@@ -36,6 +36,12 @@ internal sealed class SizeMap
         if (vertex >= triangles.Length) Array.Resize(ref triangles, 2 * vertex);
         triangles[vertex] = Find(place, t);
     }
+
+    /// <summary>True if triangle t is still the one of the earlier mesh.</summary>
+    private bool IsKept(int t) => t < earlier.TriangleCount
+        && mesh.Corners[4 * t] == earlier.Corners[3 * t]
+        && mesh.Corners[4 * t + 1] == earlier.Corners[3 * t + 1]
+        && mesh.Corners[4 * t + 2] == earlier.Corners[3 * t + 2];
 
     private int Find(Point place, int t)
     {

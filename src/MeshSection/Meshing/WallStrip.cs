@@ -17,6 +17,8 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
     private readonly int[] visits = new int[mesh.TriangleCount];
     private readonly List<int> pending = [];
     private readonly List<int> triangles = [];
+    private readonly double[] alongs = new double[3];
+    private readonly double[] heights = new double[3];
     private int visit;
     private Point begin;
     private Point along;
@@ -73,9 +75,10 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
         while (Next(out int t))
         {
             triangles.Add(t);
-            for (int e = 3 * t; e < 3 * t + 3; e++)
+            for (int k = 0; k < 3; k++)
             {
-                if (!IsFace(e) && IsOver(e, out double height, out _) && height < limit) Visit(mesh.Neighbours[e]);
+                int e = 3 * t + k;
+                if (!IsFace(e) && IsOver(k, out double height, out _) && height < limit) Visit(mesh.Neighbours[e]);
             }
         }
     }
@@ -88,9 +91,10 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
         Begin();
         while (Next(out int t))
         {
-            for (int e = 3 * t; e < 3 * t + 3; e++)
+            for (int k = 0; k < 3; k++)
             {
-                if (e == face || !IsOver(e, out double height, out double at) || height >= lowest) continue;
+                int e = 3 * t + k;
+                if (e == face || !IsOver(k, out double height, out double at) || height >= lowest) continue;
                 if (!IsFace(e)) Visit(mesh.Neighbours[e]);
                 else if (height > 0 && IsAcross(e)) (lowest, place) = (height, at);
             }
@@ -106,12 +110,19 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
         Visit(face / 3);
     }
 
+    /// <summary>Takes the next triangle of the strip, and finds where its corners lie in it.</summary>
     private bool Next(out int t)
     {
         t = -1;
         if (pending.Count == 0) return false;
         t = pending[^1];
         pending.RemoveAt(pending.Count - 1);
+        for (int k = 0; k < 3; k++)
+        {
+            Point p = mesh.Nodes[mesh.Corners[3 * t + k]] - begin;
+            alongs[k] = along.Dot(p);
+            heights[k] = along.Cross(p);
+        }
         return true;
     }
 
@@ -122,11 +133,15 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
         pending.Add(t);
     }
 
-    /// <summary>The lowest point of the part of edge e that lies in the strip; false if none does.</summary>
-    private bool IsOver(int e, out double height, out double at)
+    /// <summary>
+    /// The lowest point of the part that lies in the strip of the edge opposite corner k of the triangle taken; false if
+    /// none does.
+    /// </summary>
+    private bool IsOver(int k, out double height, out double at)
     {
-        (double s0, double h0) = Local(MeshEdge.From(mesh, e));
-        (double s1, double h1) = Local(MeshEdge.To(mesh, e));
+        int from = k == 2 ? 0 : k + 1;
+        int to = k == 0 ? 2 : k - 1;
+        (double s0, double h0, double s1, double h1) = (alongs[from], heights[from], alongs[to], heights[to]);
         double first = Math.Max(0, Math.Min(s0, s1));
         double last = Math.Min(length, Math.Max(s0, s1));
         (height, at) = (0, 0);
@@ -135,12 +150,6 @@ internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
         double atLast = h0 + (last - s0) / (s1 - s0) * (h1 - h0);
         (height, at) = atFirst <= atLast ? (atFirst, first) : (atLast, last);
         return true;
-    }
-
-    private (double Along, double Height) Local(int node)
-    {
-        Point p = mesh.Nodes[node] - begin;
-        return (along.Dot(p), along.Cross(p));
     }
 
     /// <summary>Whether edge e is the other face of the wall: turned against it, and on no segment that meets its own.</summary>

@@ -15,7 +15,11 @@ public class RefinementTests
     [Fact]
     public void Nothing_asked_for_changes_nothing()
     {
-        foreach (string name in new[] { "L", "ring", "four materials around one point", "points and lines forced into a region" })
+        foreach (string name in new[]
+        {
+            "L", "ring", "four materials around one point", "points and lines forced into a region",
+            "fan of 20 segments", "two segments at 2 and 5 degrees in a corner", "star of thin spikes",
+        })
         {
             PlanarGraph graph = HostileGraphs.All[name];
             Mesh mesh = DelaunayMesherTests.Sound(graph, new MeshSettings { MaxSide = 7 });
@@ -56,15 +60,24 @@ public class RefinementTests
 
     /// <summary>Random sides for random triangles of the hostile outlines.</summary>
     [Fact]
-    public void Sides_are_kept_wherever_they_are_asked_for()
+    public void Sides_are_kept_wherever_they_are_asked_for() =>
+        Kept([.. HostileGraphs.All.Keys.Where(n => HostileGraphs.All[n].Points.Length < 500)], 100, 1_500);
+
+    /// <summary>Where no straight way leads from one part to the next, and where several parts meet in one node.</summary>
+    [Fact]
+    public void Sides_are_kept_around_corners() => Kept(
+        ["squares that touch at a corner", "holes that touch at a point", "L", "star of thin spikes", "islands in holes", "spiral arm"],
+        300,
+        150);
+
+    private static void Kept(string[] names, int count, int nodes)
     {
-        string[] names = [.. HostileGraphs.All.Keys.Where(n => HostileGraphs.All[n].Points.Length < 500)];
         Gen.Select(Gen.Int[0, names.Length - 1], Gen.Int[0, 1 << 20], Gen.Double[0.02, 0.9], Gen.Double[0.2, 1]).Sample(
             (name, seed, share, factor) =>
             {
                 PlanarGraph graph = HostileGraphs.All[names[name]];
-                var settings = new MeshSettings { MaxNodes = 6_000 };
-                Mesh mesh = Mesher.Triangulate(graph, settings with { MaxNodes = 1_500 }, Token);
+                var settings = new MeshSettings { MaxNodes = 4 * nodes };
+                Mesh mesh = Mesher.Triangulate(graph, settings with { MaxNodes = nodes }, Token);
                 var random = new Random(seed);
                 double[] sides = [.. Enumerable.Range(0, mesh.TriangleCount).Select(
                     t => random.NextDouble() < share ? factor * Longest(mesh, t) : double.PositiveInfinity)];
@@ -82,7 +95,7 @@ public class RefinementTests
                     if (around >= 0) Assert.True(Longest(refined, t) <= sides[around] * (1 + 1e-12));
                 }
             },
-            iter: 100,
+            iter: count,
             threads: 1);
     }
 

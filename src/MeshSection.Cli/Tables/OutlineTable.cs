@@ -36,7 +36,7 @@ internal static class OutlineTable
         var box = report.Extents;
         table.AddRow("release", report.Release ?? "not stated");
         table.AddRow("unit", $"{unit.Symbol}, {(report.IsUnitGiven ? "as given" : "as the drawing states")}");
-        table.AddRow("extents", $"{Digits.Of(box.Width)} × {Digits.Of(box.Height)} {unit.Symbol}, from ({Digits.Of(box.MinX)}, {Digits.Of(box.MinY)})");
+        table.AddRow("extents", $"{Digits.Of(box.Width)} × {Digits.Of(box.Height)} {unit.Symbol}, from ({Digits.Near(box.MinX, box.Diagonal)}, {Digits.Near(box.MinY, box.Diagonal)})");
         table.AddRow("ends joined up to", $"{Digits.Of(report.MaxGap)} {unit.Symbol}, {(report.IsMaxGapGiven ? "as given" : "from the drawing's size")}");
         table.AddRow("pieces", $"{report.Pieces}, joined at {report.Joins} places");
         return table;

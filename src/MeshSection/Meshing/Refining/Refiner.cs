@@ -223,9 +223,7 @@ internal sealed class Refiner
         }
         if (mesh.Segments[longest] < 0) return false;
         if (LengthSquared(longest) <= (isSizeVaried ? sides.SquaredAt(t) : uniformSideSquared)) return false;
-        if (!Split(longest)) return false;
-        PushAgain(t);
-        return true;
+        return Split(longest);
     }
 
     private double LengthSquared(int e)

@@ -9,6 +9,7 @@ public class TablesTests
     [InlineData(80, "properties docs/examples/crane-runway-channels.json")]
     [InlineData(80, "outline dxf-samples/gate-post.dxf --layer SECTION")]
     [InlineData(80, "mesh dxf-samples/winch-shaft.dxf")]
+    [InlineData(44, "mesh dxf-samples/winch-shaft.dxf")]
     public void The_table_is_the_one_that_was_looked_at(int width, string line)
     {
         var run = CommandRun.At(width, Repository.Resolve(line.Split(' '))).WithoutTime();

@@ -8,7 +8,10 @@ namespace MeshSection.Cli.Tables;
 /// <summary>The table of <c>meshsection mesh</c>.</summary>
 internal static class MeshTable
 {
-    private const int BarWidth = 30;
+    private const int LongestBar = 30;
+
+    // What stands before the bars, and around them.
+    private const int BesideBars = 28;
     private const int MostListed = 12;
 
     /// <summary>Writes the table.</summary>
@@ -17,7 +20,7 @@ internal static class MeshTable
         var lengths = new Lengths(input.Unit);
         Heading.Write(console, input);
         console.Write(Summary(input, mesh, report, time, lengths));
-        console.Write(Histogram(report.Quality));
+        console.Write(Histogram(report.Quality, Math.Clamp(console.Profile.Width - BesideBars, 1, LongestBar)));
         if (!report.InputAngles.IsEmpty)
         {
             console.Write(InputAngles(input, report.InputAngles, lengths));
@@ -58,7 +61,7 @@ internal static class MeshTable
         return table;
     }
 
-    private static Table Histogram(MeshQuality quality)
+    private static Table Histogram(MeshQuality quality, int longest)
     {
         var table = TableStyle.Columns("Angles", "count", "");
         var most = quality.AngleHistogram.Max();
@@ -70,7 +73,7 @@ internal static class MeshTable
                 table.AddRow(
                     $"{10 * bin} to {10 * (bin + 1)}°",
                     TableStyle.Number(count),
-                    new string('#', (int)Math.Ceiling((double)BarWidth * count / most)));
+                    new string('#', (int)Math.Ceiling((double)longest * count / most)));
             }
         }
 

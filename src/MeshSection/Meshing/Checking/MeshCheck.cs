@@ -59,9 +59,9 @@ public static class MeshCheck
     private static void AddTriangleFaults(
         Mesh mesh, PlanarGraph graph, int t, ImmutableArray<MeshFault>.Builder faults)
     {
-        Point a = mesh.Nodes[mesh.Corners[3 * t]];
-        Point b = mesh.Nodes[mesh.Corners[3 * t + 1]];
-        Point c = mesh.Nodes[mesh.Corners[3 * t + 2]];
+        Point a = Place(mesh.Corners[3 * t]);
+        Point b = Place(mesh.Corners[3 * t + 1]);
+        Point c = Place(mesh.Corners[3 * t + 2]);
         Point centre = (a + b + c) / 3;
         if (Predicates.Orientation(a.X, a.Y, b.X, b.Y, c.X, c.Y) <= 0) Add(MeshFaultKind.Orientation);
         if (mesh.Regions[t] < 0) Add(MeshFaultKind.Region);
@@ -83,8 +83,10 @@ public static class MeshCheck
                 continue;
             }
             if (other < 0 || mesh.Regions[other] != mesh.Regions[t]) Add(MeshFaultKind.OpenEdge);
-            else if (t < other && !IsDelaunay(a, b, c, mesh.Nodes[mesh.Corners[twin]])) Add(MeshFaultKind.NotDelaunay);
+            else if (t < other && !IsDelaunay(a, b, c, Place(mesh.Corners[twin]))) Add(MeshFaultKind.NotDelaunay);
         }
+
+        Point Place(int node) => new(Predicates.Sizeable(mesh.Nodes[node].X), Predicates.Sizeable(mesh.Nodes[node].Y));
 
         void Add(MeshFaultKind kind) => faults.Add(new MeshFault(kind, t, centre));
     }

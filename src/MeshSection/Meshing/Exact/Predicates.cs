@@ -8,12 +8,18 @@ namespace MeshSection.Meshing;
 /// </summary>
 internal static class Predicates
 {
+    /// <summary>The smallest coordinate of which four may be multiplied without underflow.</summary>
+    private const double SmallestCoordinate = 1e-40;
+
     private const double Epsilon = 1.1102230246251565e-16;
     private const double OrientationBound = (3 + 16 * Epsilon) * Epsilon;
     private const double InCircleBound = (10 + 96 * Epsilon) * Epsilon;
 
     /// <summary>2^-96: a chain of ten operations, each wrong by 5 · 2^-106 at most, stays far below.</summary>
     private const double DoubleWordBound = 1.2621774483536189e-29;
+
+    /// <summary>A coordinate for which signs are exact: what is too small counts as 0.</summary>
+    public static double Sizeable(double coordinate) => Math.Abs(coordinate) < SmallestCoordinate ? 0 : coordinate;
 
     /// <summary>Positive if a, b, c turn counter-clockwise, negative if clockwise, zero if they are collinear.</summary>
     public static double Orientation(double ax, double ay, double bx, double by, double cx, double cy)

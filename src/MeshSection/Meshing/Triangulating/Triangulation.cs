@@ -17,9 +17,6 @@ internal sealed class Triangulation
     /// <summary>The queue link of a triangle that waits in no queue.</summary>
     public const int NotQueued = -2;
 
-    /// <summary>The smallest coordinate, mm, of which four may be multiplied exactly; below, it counts as 0.</summary>
-    private const double SmallestCoordinate = 1e-40;
-
     private int[] pending = new int[64];
     private int pendingCount;
 
@@ -65,7 +62,7 @@ internal sealed class Triangulation
         (PointAt(Corners[4 * t]) + PointAt(Corners[4 * t + 1]) + PointAt(Corners[4 * t + 2])) / 3;
 
     /// <summary>Adds a vertex that was given, not made.</summary>
-    public int AddGiven(Point point) => AddVertex(Sizeable(point.X), Sizeable(point.Y), -1);
+    public int AddGiven(Point point) => AddVertex(Predicates.Sizeable(point.X), Predicates.Sizeable(point.Y), -1);
 
     public int AddVertex(double x, double y, int home)
     {
@@ -148,8 +145,6 @@ internal sealed class Triangulation
 
     /// <summary>Keeps the first triangles only.</summary>
     public void Truncate(int triangleCount) => TriangleCount = triangleCount;
-
-    private static double Sizeable(double coordinate) => Math.Abs(coordinate) < SmallestCoordinate ? 0 : coordinate;
 
     private static T[] Grown<T>(T[] old, int used) => Grown(old, used, checked((used + used / 2 + 64) & ~3));
 

@@ -59,7 +59,7 @@ internal sealed class SegmentInsertion
     private int Leave(int s, int a, int b)
     {
         int e = starts[a];
-        while (true)
+        for (int step = 0; step <= mesh.TriangleCount; step++)
         {
             int u = mesh.From(e);
             int v = mesh.To(e);
@@ -72,7 +72,12 @@ internal sealed class SegmentInsertion
             }
             e = mesh.Turn(e);
         }
+        throw Endless();
     }
+
+    /// <summary>With exact signs neither the turn about a vertex nor the way along a segment comes by a triangle twice.</summary>
+    private static InvalidOperationException Endless() =>
+        new("A search through the triangulation does not end: the signs are not exact.");
 
     private bool IsAhead(int a, int u, int b) =>
         (mesh.PointAt(u) - mesh.PointAt(a)).Dot(mesh.PointAt(b) - mesh.PointAt(a)) > 0;
@@ -88,6 +93,7 @@ internal sealed class SegmentInsertion
         right.Add(mesh.From(e), Triangulation.Previous(e));
         while (true)
         {
+            if (crossed.Count > mesh.TriangleCount) throw Endless();
             if (mesh.Segments[e] >= 0) throw Crossing(s, mesh.Segments[e]);
             int f = mesh.Twins[e];
             int next = Triangulation.Next(f);

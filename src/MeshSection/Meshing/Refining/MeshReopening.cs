@@ -22,16 +22,15 @@ internal static class MeshReopening
             int to = 4 * (e / 3) + e % 3;
             opened.Twins[to] = neighbour < 0 ? -1 : 4 * neighbour + MeshEdge.SideTo(mesh, neighbour, e / 3, MeshEdge.To(mesh, e));
             opened.Segments[to] = mesh.Segments[e];
-            if (mesh.Segments[e] >= 0) SetHomes(opened, graph.Segments[mesh.Segments[e]], mesh.Segments[e], to);
+            if (mesh.Segments[e] >= 0) SetHome(opened, graph.Segments[mesh.Segments[e]], mesh.Segments[e], to);
         }
         return opened;
     }
 
-    private static void SetHomes(Triangulation opened, Segment segment, int s, int e)
+    /// <summary>Every vertex inside a segment ends an edge along it, seen from either side.</summary>
+    private static void SetHome(Triangulation opened, Segment segment, int s, int e)
     {
-        int from = opened.From(e);
         int to = opened.To(e);
-        if (from != segment.From && from != segment.To) opened.Home[from] = s;
         if (to != segment.From && to != segment.To) opened.Home[to] = s;
     }
 }

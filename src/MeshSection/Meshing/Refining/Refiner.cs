@@ -208,9 +208,8 @@ internal sealed class Refiner
 
     private int AddVertex(Point place, int home, int t)
     {
-        int v = mesh.AddVertex(place.X, place.Y, home);
-        map?.Add(v, place, t);
-        return v;
+        map?.Add(place, t);
+        return mesh.AddVertex(place.X, place.Y, home);
     }
 
     /// <summary>Halves the longest side of triangle t if it is too long and lies on a segment.</summary>

@@ -15,7 +15,7 @@ public static class MeshSizing
     private const int MaxRounds = 40;
 
     /// <summary>Meshes to make at most in search of the number of elements.</summary>
-    private const int MaxTries = 5;
+    private const int MaxTries = 4;
 
     /// <summary>Triangles in a refined mesh for each time that the largest one would fit into the area, about.</summary>
     private const double TrianglesPerFit = 1.57;
@@ -41,18 +41,25 @@ public static class MeshSizing
         ArgumentNullException.ThrowIfNull(mesher);
         ArgumentNullException.ThrowIfNull(settings);
         ArgumentOutOfRangeException.ThrowIfLessThan(count, 1);
-        double maxArea = TrianglesPerFit * area / count;
-        Mesh? best = null;
-        for (int i = 0; i < MaxTries; i++)
+        (double fits, Mesh best) = (count / TrianglesPerFit, Tried(count / TrianglesPerFit));
+        (double otherFits, int otherCount) = (0, 0);
+        for (int i = 1; i < MaxTries && Miss(best, count) > CountTolerance; i++)
         {
-            Mesh mesh = mesher.Triangulate(graph, settings with { MaxArea = maxArea }, cancellation);
-            if (best is null || Miss(mesh, count) < Miss(best, count)) best = mesh;
-            if (Miss(best, count) <= CountTolerance) break;
-            maxArea *= (double)mesh.TriangleCount / count;
-            // Where the outline needs more than are wanted, a larger area changes nothing.
-            if (maxArea >= area) break;
+            // The count grows nearly in a straight line with how often the largest triangle fits; at first, from nothing.
+            double next = fits + (count - best.TriangleCount) * (fits - otherFits) / (best.TriangleCount - otherCount);
+
+            // Where the outline needs more than are wanted, no area is large enough.
+            next = next > 1 ? next : 1;
+            if (next == fits) break;
+            Mesh mesh = Tried(next);
+            bool isBetter = Miss(mesh, count) < Miss(best, count);
+            (otherFits, otherCount) = isBetter ? (fits, best.TriangleCount) : (next, mesh.TriangleCount);
+            (fits, best) = isBetter ? (next, mesh) : (fits, best);
+            if (otherCount == best.TriangleCount) break;
         }
-        return best!;
+        return best;
+
+        Mesh Tried(double fit) => mesher.Triangulate(graph, settings with { MaxArea = area / fit }, cancellation);
     }
 
     /// <summary>

@@ -110,6 +110,7 @@ public class BadInputTests
     [InlineData("mesh FILE --line 1,1,1,1", "ends where it begins")]
     [InlineData("mesh FILE --size-at 1,1,0", "--size-at 1,1,0", "above zero")]
     [InlineData("mesh FILE --region-size 2=1mm", "--region-size 2", "one region, number 1")]
+    [InlineData("mesh FILE --region-size 1=1e-6mm", "--region-size", "triangles", "longer")]
     [InlineData("mesh FILE --region-size 1mm", "--region-size 1mm", "2=1.5mm")]
     [InlineData("mesh FILE --order 3", "--order 3", "1 or 2")]
     [InlineData("mesh FILE --out mesh.stl", "mesh.stl", ".png, .vtu or .msh")]

@@ -39,7 +39,7 @@ internal static class Cautions
         if (left > 0)
         {
             terminal.Error.WriteLine(FormattableString.Invariant(
-                $"caution: the mesh ended at its limit of {mesh.Nodes.Length} nodes, with {left} triangles left below what was asked for; 'meshsection mesh' lists them. A wall far thinner than it is long takes that many: leave it out of the drawing, or ask for a smaller --min-angle."));
+                $"caution: the mesh ended at its limit of {mesh.Nodes.Length} nodes, with {left} triangles left below what was asked for; 'meshsection mesh' lists them. A wall far thinner than it is long takes that many, and so do sizes far smaller than the section: leave the wall out of the drawing, or ask for less."));
         }
     }
 }

@@ -56,7 +56,7 @@ internal sealed record MeshDetail(
             if (region < 1 || region > count)
             {
                 throw new CommandException(
-                    $"--region-size {region}: the section has {(count == 1 ? "one region, number 1" : $"regions 1 to {count}")}; 'meshsection outline' lists them.");
+                    $"--region-size {region}: the section has {(count == 1 ? "one region, number 1" : $"regions 1 to {count}")}; 'meshsection mesh' lists them.");
             }
 
             sides[region - 1] = side.In(LengthUnit.Millimetre, unit);

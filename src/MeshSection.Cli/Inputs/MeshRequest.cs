@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MeshSection.Geometry;
 using MeshSection.Integration;
 using MeshSection.Meshing;
@@ -58,25 +59,40 @@ internal sealed record MeshRequest(
             SizeField = Detail.SizeField(outline, unit),
             RegionMaxSides = Detail.RegionMaxSides(section, unit),
         };
-        settings = settings with { MinAngle = MinAngle ?? settings.MinAngle };
+        var byRegion = TrianglesByRegion(outline, settings.RegionMaxSides);
+        Refuse(byRegion, "--region-size", "Give longer ones.", memory);
+        settings = settings with
+        {
+            MinAngle = MinAngle ?? settings.MinAngle,
+            MaxNodes = LeastNodeLimit + (int)byRegion,
+        };
         Mesh mesh;
         if (ElementSize is { } size)
         {
             var side = size.In(LengthUnit.Millimetre, unit);
-            var count = area / (FitsPerTriangle * Math.Sqrt(3) / 4 * side * side);
+            var count = Triangles(area, side);
             Refuse(count, $"--element-size {size.Value}", "Give a longer one.", memory);
-            settings = settings with { MaxSide = side, MaxNodes = LeastNodeLimit + (int)count };
+            settings = settings with { MaxSide = side, MaxNodes = settings.MaxNodes + (int)count };
             mesh = mesher.Triangulate(flat.Graph, settings);
         }
         else
         {
             Refuse(Elements, $"--elements {Elements}", "Give fewer.", memory);
-            settings = settings with { MaxNodes = LeastNodeLimit + Elements };
+            settings = settings with { MaxNodes = settings.MaxNodes + Elements };
             mesh = MeshSizing.ForCount(mesher, flat.Graph, settings, area, Elements);
         }
 
         return (flat, Across is { } across ? Refined(mesher, mesh, flat.Graph, settings, across, memory) : mesh);
     }
+
+    /// <summary>About how many triangles the regions take that have a longest side of their own.</summary>
+    private static double TrianglesByRegion(Outline outline, ImmutableArray<double> sides) => outline.Boundaries
+        .GroupBy(b => b.Region)
+        .Where(region => region.Key < sides.Length)
+        .Sum(region => Triangles(region.Sum(b => b.Boundary.SignedArea), sides[region.Key]));
+
+    private static double Triangles(double area, double longestSide) =>
+        area / (FitsPerTriangle * Math.Sqrt(3) / 4 * longestSide * longestSide);
 
     private static Mesh Refined(
         DelaunayMesher mesher, Mesh mesh, PlanarGraph graph, MeshSettings settings, int across, MemoryNeed memory)

@@ -20,6 +20,11 @@ internal static class MeshTable
         var lengths = new Lengths(input.Unit);
         Heading.Write(console, input);
         console.Write(Summary(input, mesh, report, time, lengths));
+        if (report.Regions.Length > 1)
+        {
+            console.Write(Regions(input, report, lengths));
+        }
+
         console.Write(Histogram(report.Quality, Math.Clamp(console.Profile.Width - BesideBars, 1, LongestBar)));
         if (!report.InputAngles.IsEmpty)
         {
@@ -75,6 +80,28 @@ internal static class MeshTable
                     TableStyle.Number(count),
                     new string('#', (int)Math.Ceiling((double)longest * count / most)));
             }
+        }
+
+        return table;
+    }
+
+    private static Table Regions(SectionInput input, MeshReport report, Lengths lengths)
+    {
+        var (origin, size) = (input.Section.Outline.Origin, input.Section.Outline.Bounds.Diagonal);
+        var table = TableStyle.Columns("Region", "triangles", $"area {lengths.Symbol(2)}", "centroid");
+        for (var r = 0; r < Math.Min(report.Regions.Length, MostListed); r++)
+        {
+            var region = report.Regions[r];
+            table.AddRow(
+                TableStyle.Number(r + 1),
+                TableStyle.Number(region.Triangles),
+                lengths.Of(region.Area, 2),
+                lengths.Of(origin + region.Centroid, size));
+        }
+
+        if (report.Regions.Length > MostListed)
+        {
+            table.AddRow($"and {report.Regions.Length - MostListed} more", "", "", "");
         }
 
         return table;

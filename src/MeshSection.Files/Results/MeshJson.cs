@@ -34,7 +34,6 @@ public static class MeshJson
     {
         var writer = new ResultWriter(json, unit);
         var quality = report.Quality;
-        var regions = RegionAreas(mesh);
         json.WriteStartObject();
         writer.Units(unit);
         json.WriteNumber("triangles", mesh.TriangleCount);
@@ -52,12 +51,14 @@ public static class MeshJson
         }
 
         json.WriteEndArray();
-        writer.Number("area", regions.Sum(), 2);
+        writer.Number("area", report.Regions.Sum(r => r.Area), 2);
         json.WriteStartArray("regions");
-        foreach (var area in regions)
+        foreach (var region in report.Regions)
         {
             json.WriteStartObject();
-            writer.Number("area", area, 2);
+            json.WriteNumber("triangles", region.Triangles);
+            writer.Number("area", region.Area, 2);
+            writer.Point("centroid", origin + region.Centroid);
             json.WriteEndObject();
         }
 
@@ -107,20 +108,6 @@ public static class MeshJson
             writer.Point("from", origin + wall.From);
             writer.Point("to", origin + wall.To);
         });
-    }
-
-    private static double[] RegionAreas(Mesh mesh)
-    {
-        var areas = new double[mesh.Regions.Max() + 1];
-        for (var t = 0; t < mesh.TriangleCount; t++)
-        {
-            var a = mesh.Nodes[mesh.Corners[3 * t]];
-            var b = mesh.Nodes[mesh.Corners[3 * t + 1]];
-            var c = mesh.Nodes[mesh.Corners[3 * t + 2]];
-            areas[mesh.Regions[t]] += 0.5 * (b - a).Cross(c - a);
-        }
-
-        return areas;
     }
 
     private static string Cause(UnrefinedCause cause) => cause switch

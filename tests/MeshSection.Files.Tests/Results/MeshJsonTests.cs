@@ -25,6 +25,7 @@ public class MeshJsonTests
 
     private static readonly MeshReport Report = new(
         MeshQuality.Of(Mesh),
+        MeshRegion.Of(Mesh),
         [new InputAngle(0, new(0, 0), 20, 0, 1)],
         new Wall(12.7, new(25.4, 0), new(25.4, 12.7), 3),
         0.254,
@@ -54,6 +55,9 @@ public class MeshJsonTests
         Assert.Equal(0.5, JsonPaths.Number(Document, "largestTriangle"), 1e-12);
         Assert.Equal(0.5, JsonPaths.Number(Document["regions"]?[0], "area"), 1e-12);
         Assert.Equal(1.0, JsonPaths.Number(Document["regions"]?[1], "area"), 1e-12);
+        Assert.Equal(2, JsonPaths.Number(Document["regions"]?[1], "triangles"));
+        Assert.Equal(10 + 2.0 / 3, JsonPaths.Number(Document["regions"]?[0], "centroid.x"), 1e-12);
+        Assert.Equal(-10 + 1.0 / 3, JsonPaths.Number(Document["regions"]?[0], "centroid.y"), 1e-12);
     }
 
     [Fact]

@@ -15,7 +15,7 @@ internal sealed record Sample(Section Section, Mesh Mesh, SectionProperties Prop
 
     /// <summary>A report on the mesh, with a wall of 3 and two points that were to be kept.</summary>
     public MeshReport Report => new(
-        MeshQuality.Of(Mesh), [], new Wall(3, Mesh.Nodes[0], Mesh.Nodes[1], 2), 0, [Mesh.Nodes[2], Mesh.Nodes[3]]);
+        MeshQuality.Of(Mesh), MeshRegion.Of(Mesh), [], new Wall(3, Mesh.Nodes[0], Mesh.Nodes[1], 2), 0, [Mesh.Nodes[2], Mesh.Nodes[3]]);
 
     public Sample Titled(string title) => this with { Section = Section with { Title = title } };
 

@@ -69,6 +69,17 @@ public class MeshSizingTests
         Assert.InRange(mesh.TriangleCount, 500, 5000);
     }
 
+    [Fact]
+    public void A_field_below_the_digits_of_the_coordinates_ends_with_them()
+    {
+        var field = new Cone(new Point(70, 40), 1e-300, 0.25);
+        Mesh mesh = DelaunayMesherTests.Sound(HostileGraphs.All["rectangle"], new MeshSettings { SizeField = field });
+        Assert.InRange(mesh.TriangleCount, 1000, 20_000);
+        Assert.NotEmpty(mesh.Unrefined);
+        Assert.All(mesh.Unrefined, left => Assert.Equal(UnrefinedCause.LeastEdge, left.Cause));
+        Assert.All(mesh.Unrefined, left => Assert.InRange(left.Place.DistanceTo(field.Tip), 0, 1e-10));
+    }
+
     [Theory]
     [InlineData(0)]
     [InlineData(-1)]

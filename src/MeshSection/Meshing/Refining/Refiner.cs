@@ -14,7 +14,10 @@ internal sealed class Refiner
     /// <summary>By how much an angle may miss the bound, degrees: an input angle equal to it is not refined.</summary>
     private const double AngleSlack = 1e-6;
 
-    /// <summary>The shortest edge that may be split, in units of the largest coordinate.</summary>
+    /// <summary>
+    /// The shortest edge that may be split, and the longest of a triangle that may be refined, in units of the largest
+    /// coordinate.
+    /// </summary>
     private const double LeastEdge = 1.0 / (1L << 44);
 
     /// <summary>The urgency of a triangle that is only too large.</summary>
@@ -193,6 +196,7 @@ internal sealed class Refiner
 
     private void Refine(int t, int shortest, bool isSpared)
     {
+        if (IsTiny(shortest)) return;
         Point place = NewPlace(shortest, isSpared);
         if (!cavity.Contains(t, place.X, place.Y)) return;
         cavity.Collect(t, place.X, place.Y);
@@ -205,6 +209,11 @@ internal sealed class Refiner
         cavity.Fill(AddVertex(place, -1, t));
         for (int i = 0; i < cavity.RimCount; i++) Examine(cavity.Triangle(i));
     }
+
+    /// <summary>Whether no edge of a triangle is long enough for the digits of the coordinates.</summary>
+    private bool IsTiny(int shortest) => LengthSquared(shortest) < leastEdgeSquared
+        && LengthSquared(Triangulation.Next(shortest)) < leastEdgeSquared
+        && LengthSquared(Triangulation.Previous(shortest)) < leastEdgeSquared;
 
     private int AddVertex(Point place, int home, int t)
     {

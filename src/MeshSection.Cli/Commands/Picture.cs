@@ -18,6 +18,11 @@ internal static class Picture
         {
             throw new CommandException($"--out {path}: cannot be written: {fault.Message}");
         }
+        catch (Exception fault) when (fault is TypeInitializationException or DllNotFoundException)
+        {
+            throw new CommandException(
+                $"--out {path}: the graphics library SkiaSharp could not be loaded on this machine. On Linux it needs the C library of a current distribution; results without a picture do not need it.");
+        }
 
         if (!output.IsQuiet && !output.IsJson)
         {

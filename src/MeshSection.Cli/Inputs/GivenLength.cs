@@ -47,7 +47,7 @@ internal readonly record struct GivenLength(double Value, LengthUnit? Unit)
     public static LengthUnit ParseUnit(string text, string option) => LengthUnit.TryParse(text, out var unit)
         ? unit!
         : throw new CommandException(
-            $"{option} {text}: no such unit of length. Known are {string.Join(", ", LengthUnit.All.Select(u => u.Symbol))}.");
+            $"{option} {text}: no such unit of length. Give mm, cm, m, in or ft, or another that a drawing can state, by symbol or name.");
 
     /// <summary>The length in a unit.</summary>
     /// <param name="unit">The unit wanted.</param>

@@ -61,7 +61,7 @@ internal static class ElasticTable
     private sealed record Side(string Name, ExtremeFibres Both, ExtremeFibre Fibre)
     {
         public string Verdict =>
-            Math.Abs(Both.Positive.Modulus - Both.Negative.Modulus) <= 1e-9 * Fibre.Modulus ? "both equal"
+            Both.PositiveGoverns && Both.NegativeGoverns ? "both equal"
             : Fibre == Both.Governing ? "◄ governs"
             : "";
     }

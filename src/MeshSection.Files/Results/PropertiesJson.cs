@@ -93,8 +93,8 @@ public static class PropertiesJson
         });
         writer.Object("governing", () =>
         {
-            writer.Json.WriteString("x", p.ElasticX.PositiveGoverns ? "top" : "bottom");
-            writer.Json.WriteString("y", p.ElasticY.PositiveGoverns ? "right" : "left");
+            writer.Json.WriteString("x", Governing(p.ElasticX, "top", "bottom"));
+            writer.Json.WriteString("y", Governing(p.ElasticY, "right", "left"));
         });
         writer.Object("extremeFibre", () =>
         {
@@ -218,6 +218,9 @@ public static class PropertiesJson
         writer.Number("xy", moments.XY, 4);
         writer.Number("polar", moments.Polar, 4);
     });
+
+    private static string Governing(ExtremeFibres fibres, string positive, string negative) =>
+        !fibres.NegativeGoverns ? positive : !fibres.PositiveGoverns ? negative : "both";
 
     private static void Fibre(ResultWriter writer, string key, ExtremeFibre fibre) => writer.Object(key, () =>
     {

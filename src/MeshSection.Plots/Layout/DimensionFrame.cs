@@ -95,10 +95,10 @@ internal sealed class DimensionFrame(Outline outline, SectionProperties properti
         var x = properties.ElasticX;
         var y = properties.ElasticY;
         return new Dimensions(
-            new Dimension(box.MinY, c.Y, lengths.Format(x.Positive.Distance), GoverningSign.PositiveGoverns(x)),
-            new Dimension(c.Y, box.MaxY, lengths.Format(x.Negative.Distance), GoverningSign.NegativeGoverns(x)),
-            new Dimension(box.MinX, c.X, lengths.Format(y.Negative.Distance), GoverningSign.NegativeGoverns(y)),
-            new Dimension(c.X, box.MaxX, lengths.Format(y.Positive.Distance), GoverningSign.PositiveGoverns(y)),
+            new Dimension(box.MinY, c.Y, lengths.Format(x.Positive.Distance), x.PositiveGoverns),
+            new Dimension(c.Y, box.MaxY, lengths.Format(x.Negative.Distance), x.NegativeGoverns),
+            new Dimension(box.MinX, c.X, lengths.Format(y.Negative.Distance), y.NegativeGoverns),
+            new Dimension(c.X, box.MaxX, lengths.Format(y.Positive.Distance), y.PositiveGoverns),
             new Dimension(box.MinY, box.MaxY, lengths.Format(bounds.Height), false),
             new Dimension(box.MinX, box.MaxX, lengths.Format(bounds.Width), false));
     }

@@ -7,25 +7,16 @@ namespace MeshSection.Plots.Layout;
 /// <summary>Which extreme fibres govern, and the sign that marks them.</summary>
 internal static class GoverningSign
 {
-    // Two sides whose moduli differ by rounding only both govern.
-    private const double Tie = 1e-9;
-
-    public static bool PositiveGoverns(ExtremeFibres fibres) =>
-        fibres.Positive.Modulus <= fibres.Negative.Modulus * (1 + Tie);
-
-    public static bool NegativeGoverns(ExtremeFibres fibres) =>
-        fibres.Negative.Modulus <= fibres.Positive.Modulus * (1 + Tie);
-
     public static IEnumerable<ExtremeFibre> Fibres(SectionProperties properties)
     {
         foreach (var fibres in (ExtremeFibres[])[properties.ElasticX, properties.ElasticY])
         {
-            if (PositiveGoverns(fibres))
+            if (fibres.PositiveGoverns)
             {
                 yield return fibres.Positive;
             }
 
-            if (NegativeGoverns(fibres))
+            if (fibres.NegativeGoverns)
             {
                 yield return fibres.Negative;
             }

@@ -38,7 +38,7 @@ internal static class KeyValues
 
     private static string Governing(ExtremeFibres fibres, string positive, string negative)
     {
-        var isTie = GoverningSign.PositiveGoverns(fibres) && GoverningSign.NegativeGoverns(fibres);
+        var isTie = fibres.PositiveGoverns && fibres.NegativeGoverns;
         return isTie ? $"{positive} = {negative}"
             : fibres.PositiveGoverns ? $"{positive} governs"
             : $"{negative} governs";

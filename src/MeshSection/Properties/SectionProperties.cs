@@ -35,11 +35,17 @@ public readonly record struct ExtremeFibre(double Distance, Point Point, double 
 /// <param name="Negative">Bottom for x, left for y, the negative side of the other axis for 1 and 2.</param>
 public readonly record struct ExtremeFibres(ExtremeFibre Positive, ExtremeFibre Negative)
 {
-    /// <summary>The side with the smaller modulus: there the stress is greatest.</summary>
-    public ExtremeFibre Governing => PositiveGoverns ? Positive : Negative;
+    // Two sides whose moduli differ by rounding only both govern.
+    private const double Tie = 1e-9;
 
-    /// <summary>True if the positive side governs; on a tie it does.</summary>
-    public bool PositiveGoverns => Positive.Modulus <= Negative.Modulus;
+    /// <summary>The side with the smaller modulus: there the stress is greatest.</summary>
+    public ExtremeFibre Governing => Positive.Modulus <= Negative.Modulus ? Positive : Negative;
+
+    /// <summary>True if the positive side governs, or both do.</summary>
+    public bool PositiveGoverns => Positive.Modulus <= Negative.Modulus * (1 + Tie);
+
+    /// <summary>True if the negative side governs, or both do.</summary>
+    public bool NegativeGoverns => Negative.Modulus <= Positive.Modulus * (1 + Tie);
 }
 
 /// <summary>Full plastic bending about one axis.</summary>

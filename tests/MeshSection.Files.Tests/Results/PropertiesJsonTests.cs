@@ -169,6 +169,15 @@ public class PropertiesJsonTests
             ElasticY = new(Properties.ElasticY.Negative, Properties.ElasticY.Positive),
         };
         Assert.Equal("""{"x":"bottom","y":"left"}""", Document(LengthUnit.Inch, other)["governing"]?.ToJsonString());
+
+        // Sides that differ by rounding only both govern, whichever is the smaller in its last digit.
+        var (top, right) = (Properties.ElasticX.Positive, Properties.ElasticY.Positive);
+        var even = Properties with
+        {
+            ElasticX = new(top, top with { Modulus = top.Modulus * (1 + 1e-14) }),
+            ElasticY = new(right with { Modulus = right.Modulus * (1 + 1e-14) }, right),
+        };
+        Assert.Equal("""{"x":"both","y":"both"}""", Document(LengthUnit.Inch, even)["governing"]?.ToJsonString());
     }
 
     [Fact]

@@ -8,26 +8,11 @@ internal static class Nesting
     public static ImmutableArray<NestedBoundary> Of(ImmutableArray<Boundary> loops, out int regionCount)
     {
         var areas = loops.Select(b => b.SignedArea).ToArray();
-        var boxes = loops.Select(b => b.Bounds).ToArray();
-        var bySize = Enumerable.Range(0, loops.Length).OrderByDescending(i => Math.Abs(areas[i])).ToArray();
-        var parents = new int[loops.Length];
+        var parents = Parents(loops, areas);
         var depths = new int[loops.Length];
-        for (var rank = 0; rank < bySize.Length; rank++)
+        foreach (var inner in Enumerable.Range(0, loops.Length).OrderByDescending(i => Math.Abs(areas[i])))
         {
-            // Sound boundaries never cross, so one point of the loop tells, and the smallest loop around it is its parent.
-            var inner = bySize[rank];
-            var point = loops[inner].Edges[0].Start;
-            parents[inner] = -1;
-            for (var k = rank - 1; k >= 0; k--)
-            {
-                var outer = bySize[k];
-                if (boxes[outer].Contains(point) && WindingNumber.Of(loops[outer], point) != 0)
-                {
-                    parents[inner] = outer;
-                    depths[inner] = depths[outer] + 1;
-                    break;
-                }
-            }
+            depths[inner] = parents[inner] < 0 ? 0 : depths[parents[inner]] + 1;
         }
 
         var regions = new int[loops.Length];
@@ -50,5 +35,40 @@ internal static class Nesting
         }
 
         return nested.MoveToImmutable();
+    }
+
+    /// <summary>
+    /// The smallest loop around each: sound boundaries never cross, so that one point of a loop tells. A sweep from left to
+    /// right looks only at loops that reach past the point.
+    /// </summary>
+    private static int[] Parents(ImmutableArray<Boundary> loops, double[] areas)
+    {
+        var boxes = loops.Select(b => b.Bounds).ToArray();
+        var byLeft = Enumerable.Range(0, loops.Length).OrderBy(i => boxes[i].MinX).ToArray();
+        var parents = new int[loops.Length];
+        var active = new List<int>();
+        var next = 0;
+        foreach (var inner in Enumerable.Range(0, loops.Length).OrderBy(i => loops[i].Edges[0].Start.X))
+        {
+            var point = loops[inner].Edges[0].Start;
+            for (; next < byLeft.Length && boxes[byLeft[next]].MinX <= point.X; next++)
+            {
+                active.Add(byLeft[next]);
+            }
+
+            active.RemoveAll(i => boxes[i].MaxX < point.X);
+            parents[inner] = -1;
+            var least = double.PositiveInfinity;
+            foreach (var outer in active)
+            {
+                var area = Math.Abs(areas[outer]);
+                if (outer != inner && area < least && boxes[outer].Contains(point) && WindingNumber.Of(loops[outer], point) != 0)
+                {
+                    (parents[inner], least) = (outer, area);
+                }
+            }
+        }
+
+        return parents;
     }
 }

@@ -158,4 +158,49 @@ public class OutlineTests
         var stuck = Boundary.Polygon(default, new Point(1, 0), new Point(1, 0), new Point(0, 1));
         Assert.Equal(OutlineFault.NoLength, Refused(stuck).Fault);
     }
+
+    [Fact]
+    public void Loops_nested_at_random_have_the_parents_they_were_made_with()
+    {
+        var random = new Random(3);
+        for (var run = 0; run < 50; run++)
+        {
+            var (loops, parents) = (new List<Boundary>(), new List<int>());
+            Grow(new Box(0, 0, 1000, 1000), -1, 0);
+
+            // In any order.
+            int[] order = [.. Enumerable.Range(0, loops.Count)];
+            random.Shuffle(order);
+            var outline = Outline.Create(order.Select(i => loops[i]));
+            for (var i = 0; i < order.Length; i++)
+            {
+                var parent = parents[order[i]];
+                Assert.Equal(parent < 0 ? -1 : Array.IndexOf(order, parent), outline.Boundaries[i].Parent);
+            }
+
+            void Grow(Box cell, int parent, int depth)
+            {
+                var (x, y) = (cell.Centre.X, cell.Centre.Y);
+                foreach (var quarter in new[]
+                {
+                    new Box(cell.MinX, cell.MinY, x, y), new Box(x, cell.MinY, cell.MaxX, y),
+                    new Box(cell.MinX, y, x, cell.MaxY), new Box(x, y, cell.MaxX, cell.MaxY),
+                })
+                {
+                    if (depth == 4 || (loops.Count > 0 && random.NextDouble() < 0.4))
+                    {
+                        continue;
+                    }
+
+                    var box = quarter.Grown(-(0.05 + 0.1 * random.NextDouble()) * quarter.Width);
+                    var loop = random.Next(2) == 0
+                        ? Boundary.Polygon(new(box.MinX, box.MinY), new(box.MaxX, box.MinY), new(box.MaxX, box.MaxY), new(box.MinX, box.MaxY))
+                        : Boundary.Polygon(new(box.MinX, box.MaxY), new(box.MaxX, box.MaxY), new(box.MaxX, box.MinY), new(box.MinX, box.MinY));
+                    loops.Add(loop);
+                    parents.Add(parent);
+                    Grow(box, loops.Count - 1, depth + 1);
+                }
+            }
+        }
+    }
 }

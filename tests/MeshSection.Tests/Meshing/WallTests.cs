@@ -157,7 +157,7 @@ public class WallTests
                 Segment own = graph.Segments[mesh.Segments[face]];
                 Segment other = graph.Segments[mesh.Segments[exit]];
                 bool isCorner = own.From == other.To || own.To == other.From;
-                return !isCorner && across.Dot(chord) < -0.51 * across.Length * chord.Length ? count : null;
+                return !isCorner && across.Dot(chord) < -0.867 * across.Length * chord.Length ? count : null;
             }
             entered = Enumerable.Range(3 * next, 3).First(e => mesh.Neighbours[e] == t);
             t = next;

@@ -8,8 +8,11 @@ namespace MeshSection.Meshing;
 /// </summary>
 internal sealed class WallStrip(Mesh mesh, PlanarGraph graph)
 {
-    /// <summary>Of two faces of a wall, the cosine of the angle between their inward normals: at least 120 degrees.</summary>
-    private const double FacingCosine = -0.5;
+    /// <summary>
+    /// Of two faces of a wall, the cosine of the angle between their inward normals: at least 150 degrees, so that walls may
+    /// taper by 30, and rounded ends look little thinner than they are.
+    /// </summary>
+    private const double FacingCosine = -0.8660254037844386;
 
     /// <summary>The part of a length that may be rounding.</summary>
     private const double Rounding = 1e-9;

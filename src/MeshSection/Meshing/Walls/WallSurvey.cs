@@ -4,7 +4,7 @@ namespace MeshSection.Meshing;
 
 /// <summary>
 /// The walls of a mesh, found from its geometry alone. Every edge on the boundary of a region looks straight into the
-/// region; where a boundary that faces it, turned by at least 120 degrees against it, comes first, there is a wall. Two
+/// region; where a boundary that faces it, turned by at least 150 degrees against it, comes first, there is a wall. Two
 /// segments that meet in a corner are no wall, for their distance comes down to nothing.
 /// </summary>
 public sealed class WallSurvey

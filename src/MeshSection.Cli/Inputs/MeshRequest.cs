@@ -8,15 +8,17 @@ using MeshSection.Units;
 namespace MeshSection.Cli.Inputs;
 
 /// <summary>What the command line says of the mesh.</summary>
-/// <param name="Elements">How many triangles to make, if no size is given.</param>
+/// <param name="Elements">How many triangles to make, if given.</param>
 /// <param name="ElementSize">The longest side of a triangle, if given.</param>
 /// <param name="Across">How many elements to have across every wall, if given.</param>
 /// <param name="MinAngle">The smallest angle wanted, degrees, if given.</param>
 /// <param name="Sag">The farthest that a chord may lie from its curve, if given.</param>
 internal sealed record MeshRequest(
-    int Elements, GivenLength? ElementSize, int? Across, double? MinAngle, GivenLength? Sag)
+    int? Elements, GivenLength? ElementSize, int? Across, double? MinAngle, GivenLength? Sag)
 {
-    /// <summary>Triangles made by default: enough for a picture, and for exact integrals any number is.</summary>
+    /// <summary>
+    /// About how many triangles are made by default: enough for a picture, and for exact integrals any number is.
+    /// </summary>
     public const int DefaultElements = 1000;
 
     /// <summary>The most triangles that may be asked for.</summary>
@@ -70,16 +72,22 @@ internal sealed record MeshRequest(
         if (ElementSize is { } size)
         {
             var side = size.In(LengthUnit.Millimetre, unit);
-            var count = Triangles(area, side);
-            Refuse(count, $"--element-size {size.Value}", "Give a longer one.", memory);
-            settings = settings with { MaxSide = side, MaxNodes = settings.MaxNodes + (int)count };
+            var triangles = Triangles(area, side);
+            Refuse(triangles, $"--element-size {size.Value}", "Give a longer one.", memory);
+            settings = settings with { MaxSide = side, MaxNodes = settings.MaxNodes + (int)triangles };
             mesh = mesher.Triangulate(flat.Graph, settings);
+        }
+        else if (Elements is { } count)
+        {
+            Refuse(count, $"--elements {count}", "Give fewer.", memory);
+            settings = settings with { MaxNodes = settings.MaxNodes + count };
+            mesh = MeshSizing.ForCount(mesher, flat.Graph, settings, area, count);
         }
         else
         {
-            Refuse(Elements, $"--elements {Elements}", "Give fewer.", memory);
-            settings = settings with { MaxNodes = settings.MaxNodes + Elements };
-            mesh = MeshSizing.ForCount(mesher, flat.Graph, settings, area, Elements);
+            // Nobody asked for a number: one mesh of about the default does.
+            mesh = mesher.Triangulate(
+                flat.Graph, settings with { MaxArea = MeshSizing.LargestAreaFor(area, DefaultElements) });
         }
 
         return (flat, Across is { } across ? Refined(mesher, mesh, flat.Graph, settings, across, memory) : mesh);

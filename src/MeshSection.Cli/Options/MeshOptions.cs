@@ -9,7 +9,7 @@ internal sealed class MeshOptions
 {
     private readonly Option<string?> _elements = new("--elements")
     {
-        Description = "How many triangles to make, to 2 % [default: 1000; more where the outline needs them]",
+        Description = "How many triangles to make, to 2 % [default: about 1000]; more where the outline needs them",
         HelpName = "COUNT",
     };
 
@@ -59,7 +59,7 @@ internal sealed class MeshOptions
         }
 
         return new MeshRequest(
-            elements ?? MeshRequest.DefaultElements,
+            elements,
             size,
             Count(parsed, _across, MeshRequest.MostAcross),
             parsed.GetValue(_minAngle) is { } angle ? MinAngle(angle) : null,

@@ -20,6 +20,11 @@ public static class MeshSizing
     /// <summary>Triangles in a refined mesh for each time that the largest one would fit into the area, about.</summary>
     private const double TrianglesPerFit = 1.57;
 
+    /// <summary>The largest area of a triangle, mm², with which a mesh comes out at about a number of triangles.</summary>
+    /// <param name="area">The area of the graph's regions, mm².</param>
+    /// <param name="count">How many triangles are wanted, positive.</param>
+    public static double LargestAreaFor(double area, int count) => TrianglesPerFit * area / count;
+
     /// <summary>
     /// Makes a mesh of as many triangles as wanted, to <see cref="CountTolerance"/>, all of about one size; of more only
     /// where the outline and the smallest angle need them.

@@ -36,6 +36,12 @@ public sealed record ArcEdge(Point Start, Point End, double Bulge) : Edge(Start,
     public override double Sag => 0.5 * Chord.Length * Math.Abs(Bulge);
 
     /// <inheritdoc/>
+    public override double CapArea => Cap.Of(this).Area;
+
+    /// <inheritdoc/>
+    public override bool IsFinite => Start.IsFinite && End.IsFinite && Bulge != 0 && double.IsFinite(Bulge);
+
+    /// <inheritdoc/>
     public override Box Bounds
     {
         get
@@ -83,6 +89,9 @@ public sealed record ArcEdge(Point Start, Point End, double Bulge) : Edge(Start,
     }
 
     /// <inheritdoc/>
+    public override Point VelocityAt(double t) => Length * TangentAt(t);
+
+    /// <inheritdoc/>
     public override Point TangentAt(double t)
     {
         var (sin, cos) = Math.SinCos((t - 0.5) * Sweep);
@@ -108,6 +117,9 @@ public sealed record ArcEdge(Point Start, Point End, double Bulge) : Edge(Start,
     /// <inheritdoc/>
     public override Edge Placed(Placement placement) =>
         new ArcEdge(placement.Apply(Start), placement.Apply(End), placement.Mirrors ? -Bulge : Bulge);
+
+    /// <inheritdoc/>
+    public override Edge Between(Point start, Point end) => new ArcEdge(start, end, Bulge);
 
     /// <inheritdoc/>
     public override IReadOnlyList<double> Turnings(Point direction)

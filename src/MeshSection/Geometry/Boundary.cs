@@ -26,11 +26,7 @@ public sealed class Boundary
             var area = 0.0;
             foreach (var edge in Edges)
             {
-                area += 0.5 * (edge.Start - anchor).Cross(edge.End - anchor);
-                if (edge is ArcEdge arc)
-                {
-                    area += Cap.Of(arc).Area;
-                }
+                area += 0.5 * (edge.Start - anchor).Cross(edge.End - anchor) + edge.CapArea;
             }
 
             return area;

@@ -15,7 +15,16 @@ public sealed record LineEdge(Point Start, Point End) : Edge(Start, End)
     public override double Sag => 0;
 
     /// <inheritdoc/>
+    public override double CapArea => 0;
+
+    /// <inheritdoc/>
+    public override bool IsFinite => Start.IsFinite && End.IsFinite;
+
+    /// <inheritdoc/>
     public override Point PointAt(double t) => t <= 0 ? Start : t >= 1 ? End : Start + t * Chord;
+
+    /// <inheritdoc/>
+    public override Point VelocityAt(double t) => Chord;
 
     /// <inheritdoc/>
     public override Point TangentAt(double t) => Chord / Chord.Length;
@@ -31,6 +40,9 @@ public sealed record LineEdge(Point Start, Point End) : Edge(Start, End)
 
     /// <inheritdoc/>
     public override Edge Placed(Placement placement) => new LineEdge(placement.Apply(Start), placement.Apply(End));
+
+    /// <inheritdoc/>
+    public override Edge Between(Point start, Point end) => new LineEdge(start, end);
 
     /// <inheritdoc/>
     public override IReadOnlyList<double> Turnings(Point direction) => [];

@@ -31,7 +31,7 @@ internal static class OutlineCheck
             for (var e = 0; e < loops[b].Edges.Length; e++)
             {
                 var edge = loops[b].Edges[e];
-                if (!edge.Start.IsFinite || edge is ArcEdge { Bulge: var bulge } && (bulge == 0 || !double.IsFinite(bulge)))
+                if (!edge.IsFinite)
                 {
                     throw new OutlineException(OutlineFault.NotFinite, origin + edge.Start, new EdgePlace(b, e));
                 }

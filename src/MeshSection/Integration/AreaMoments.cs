@@ -14,6 +14,15 @@ public readonly record struct AreaMoments(double Area, double X, double Y, doubl
     /// <summary>The centroid, relative to the point about which the moments were taken, mm.</summary>
     public Point Centroid => new(X / Area, Y / Area);
 
+    /// <summary>The moments of the region shifted by a vector, about the same point.</summary>
+    internal AreaMoments Moved(Point by) => new(
+        Area,
+        X + Area * by.X,
+        Y + Area * by.Y,
+        XX + 2 * by.X * X + Area * by.X * by.X,
+        YY + 2 * by.Y * Y + Area * by.Y * by.Y,
+        XY + by.X * Y + by.Y * X + Area * by.X * by.Y);
+
     /// <summary>Sum over two regions, both about the same point.</summary>
     public static AreaMoments operator +(AreaMoments a, AreaMoments b) =>
         new(a.Area + b.Area, a.X + b.X, a.Y + b.Y, a.XX + b.XX, a.YY + b.YY, a.XY + b.XY);

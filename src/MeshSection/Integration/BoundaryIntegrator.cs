@@ -4,7 +4,7 @@ namespace MeshSection.Integration;
 
 /// <summary>
 /// Integrals over a section by Green's theorem around its boundaries, in closed form: every edge gives the triangle
-/// between its chord and a fixed point, and an arc besides gives the cap on its chord. Exact but for rounding, with no
+/// between its chord and a fixed point, and a curve besides gives the cap on its chord. Exact but for rounding, with no
 /// mesh; the cost is a few operations an edge.
 /// </summary>
 /// <param name="outline">The section's boundaries.</param>
@@ -38,7 +38,7 @@ public sealed class BoundaryIntegrator(Outline outline) : IIntegrator
             w * (a.X * a.X + a.X * b.X + b.X * b.X) / 12,
             w * (a.Y * a.Y + a.Y * b.Y + b.Y * b.Y) / 12,
             w * (a.X * b.Y + 2 * (a.X * a.Y + b.X * b.Y) + b.X * a.Y) / 24);
-        return edge is ArcEdge arc ? triangle + CapMoments(arc, about) : triangle;
+        return triangle + CapMoments.Of(edge, about);
     }
 
     /// <inheritdoc/>
@@ -82,12 +82,9 @@ public sealed class BoundaryIntegrator(Outline outline) : IIntegrator
             var ds = along.Dot(piece.Chord);
             area -= ds * (d0 + d1) / 2;
             moment -= ds * (d0 * d0 + d0 * d1 + d1 * d1) / 6;
-            if (piece is ArcEdge arc)
-            {
-                var cap = Cap.Of(arc);
-                area += cap.Area;
-                moment += cap.Area * (d0 + d1) / 2 + cap.First * normal.Dot(Outwards(arc));
-            }
+            var cap = CapMoments.Of(piece, piece.Start);
+            area += cap.Area;
+            moment += cap.Area * d0 + normal.Dot(new Point(cap.X, cap.Y));
         }
     }
 
@@ -118,24 +115,4 @@ public sealed class BoundaryIntegrator(Outline outline) : IIntegrator
 
         return (from, to);
     }
-
-    private static AreaMoments CapMoments(ArcEdge arc, Point about)
-    {
-        var cap = Cap.Of(arc);
-        var middle = 0.5 * (arc.Start + arc.End) - about;
-        var u = arc.Chord / arc.Chord.Length;
-        var v = Outwards(arc);
-        var first = cap.First;
-        return new AreaMoments(
-            cap.Area,
-            cap.Area * middle.X + first * v.X,
-            cap.Area * middle.Y + first * v.Y,
-            cap.Area * middle.X * middle.X + 2 * first * middle.X * v.X + cap.Along * u.X * u.X + cap.Across * v.X * v.X,
-            cap.Area * middle.Y * middle.Y + 2 * first * middle.Y * v.Y + cap.Along * u.Y * u.Y + cap.Across * v.Y * v.Y,
-            cap.Area * middle.X * middle.Y + first * (middle.X * v.Y + middle.Y * v.X)
-                + cap.Along * u.X * u.Y + cap.Across * v.X * v.Y);
-    }
-
-    /// <summary>The unit vector from the chord towards the arc: to the right of the chord for a positive bulge.</summary>
-    private static Point Outwards(ArcEdge arc) => -Math.Sign(arc.Bulge) / arc.Chord.Length * arc.Chord.Left();
 }

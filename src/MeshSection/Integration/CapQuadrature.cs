@@ -4,31 +4,19 @@ namespace MeshSection.Integration;
 
 /// <summary>
 /// The fiber between a chord and the curve that it stands for, by quadrature: points of the curve at Gauss-Legendre
-/// abscissae of its length, each joined to the chord by a straight strip that is integrated exactly. It knows nothing
+/// abscissae of its parameter, each joined to the chord by a straight strip that is integrated exactly. It knows nothing
 /// of arcs, so it checks the closed forms. With 10 points the error of a piece that turns by θ is of the order of
 /// θ²⁰: below rounding for the pieces that flattening makes (at most 15 degrees by default).
 /// </summary>
 internal static class CapQuadrature
 {
-    // Gauss-Legendre, 10 points on (0, 1): abscissa and weight of the upper half [AbramowitzStegun1964].
-    private static readonly double[] Abscissae =
-    [
-        0.1488743389816312, 0.4333953941292472, 0.6794095682990244, 0.8650633666889845, 0.9739065285171717,
-    ];
-
-    private static readonly double[] Weights =
-    [
-        0.2955242247147529, 0.2692667193099964, 0.2190863625159820, 0.1494513491505806, 0.0666713443086881,
-    ];
-
     /// <summary>The moments of the region between a curve and its chord about a point, positive to the right of the chord.</summary>
     public static AreaMoments Moments(Edge curve, Point about)
     {
         var sum = default(AreaMoments);
-        for (var i = 0; i < Abscissae.Length; i++)
+        foreach (var (t, weight) in GaussLegendre.Points)
         {
-            sum += Strip(curve, about, 0.5 * (1 - Abscissae[i]), 0.5 * Weights[i]);
-            sum += Strip(curve, about, 0.5 * (1 + Abscissae[i]), 0.5 * Weights[i]);
+            sum += Strip(curve, about, t, weight);
         }
 
         return sum;
@@ -47,10 +35,9 @@ internal static class CapQuadrature
         {
             if (normal.Dot(curve.PointAt(0.5 * (from + to))) > offset)
             {
-                for (var i = 0; i < Abscissae.Length; i++)
+                foreach (var (at, weight) in GaussLegendre.Points)
                 {
-                    AddPoint(0.5 * (from + to) - 0.5 * (to - from) * Abscissae[i], 0.5 * (to - from) * Weights[i]);
-                    AddPoint(0.5 * (from + to) + 0.5 * (to - from) * Abscissae[i], 0.5 * (to - from) * Weights[i]);
+                    AddPoint(from + at * (to - from), (to - from) * weight);
                 }
             }
 
@@ -67,7 +54,7 @@ internal static class CapQuadrature
         void AddPoint(double t, double weight)
         {
             var d = normal.Dot(curve.PointAt(t)) - offset;
-            var ds = weight * curve.Length * along.Dot(curve.TangentAt(t));
+            var ds = weight * along.Dot(curve.VelocityAt(t));
             area -= ds * d;
             moment -= ds * d * d / 2;
         }
@@ -81,7 +68,7 @@ internal static class CapQuadrature
         var p = curve.PointAt(t) - about;
         var q = curve.Start + t * curve.Chord - about;
         var rise = p - q;
-        var onCurve = curve.Length * curve.TangentAt(t);
+        var onCurve = curve.VelocityAt(t);
         var sum = default(AreaMoments);
         foreach (var (fraction, simpson) in new[] { (0.0, 1.0 / 6), (0.5, 4.0 / 6), (1.0, 1.0 / 6) })
         {

@@ -17,7 +17,6 @@ internal sealed class EdgeBow
         var rule = TriangleRule.Curved;
         Values = new Point[rule.Count];
         Slopes = new Point[rule.Count];
-        var length = curve.Length;
         for (var q = 0; q < rule.Count; q++)
         {
             var (xi, eta) = (rule.Xi[q], rule.Eta[q]);
@@ -25,7 +24,7 @@ internal sealed class EdgeBow
             var t = 0.5 * (1 + difference);
             var bubble = t * (1 - t);
             Values[q] = (curve.PointAt(t) - curve.Start - t * curve.Chord) / bubble;
-            Slopes[q] = (length * curve.TangentAt(t) - curve.Chord - (1 - 2 * t) * Values[q]) / bubble;
+            Slopes[q] = (curve.VelocityAt(t) - curve.Chord - (1 - 2 * t) * Values[q]) / bubble;
         }
     }
 

@@ -49,7 +49,7 @@ internal static class CurvedStretch
             var s = 0.5 * (1 + lambda[b] - lambda[a]);
             var bubble = s * (1 - s);
             var g = (curve.PointAt(s) - curve.Start - s * curve.Chord) / bubble;
-            var slope = (curve.Length * curve.TangentAt(s) - curve.Chord - (1 - 2 * s) * g) / bubble;
+            var slope = (curve.VelocityAt(s) - curve.Chord - (1 - 2 * s) * g) / bubble;
             var product = lambda[a] * lambda[b];
             byLambda[a] += lambda[b] * g - 0.5 * product * slope;
             byLambda[b] += lambda[a] * g + 0.5 * product * slope;

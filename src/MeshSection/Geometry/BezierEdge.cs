@@ -12,6 +12,10 @@ public sealed record BezierEdge : Edge
     // More pieces than a flattening would ever ask for.
     private const int MostSteps = 1_000_000;
 
+    // Weights within a piece: where they differ more, the zeros of the denominator are too near for quadrature of high
+    // order; at this ratio the nearest lies two lengths of the piece away.
+    private const double MostUneven = 1.5;
+
     /// <summary>Makes the edge.</summary>
     /// <param name="controls">P, at least three points; the curve starts at the first and ends at the last.</param>
     /// <param name="weights">w, one for each point, positive.</param>
@@ -169,7 +173,7 @@ public sealed record BezierEdge : Edge
     /// <inheritdoc/>
     public override double Steps(double maxSag, double maxTurn)
     {
-        // As many as the turn asks for at least, then more until every piece keeps to both limits.
+        // As many as the turn asks for at least, then more until every piece keeps to the limits.
         var (first, last) = (TangentAt(0), TangentAt(1));
         var turn = Math.Abs(Math.Atan2(first.Cross(last), first.Dot(last)));
         var steps = Math.Max(1, Math.Ceiling(Math.Max(turn / maxTurn, Math.Sqrt(Sag / maxSag)) * (1 - 1e-12)));
@@ -254,7 +258,8 @@ public sealed record BezierEdge : Edge
         for (var i = 0; i < steps; i++)
         {
             var next = TangentAt((i + 1.0) / steps);
-            if (tangent.Dot(next) < turn || Part((double)i / steps, (i + 1.0) / steps).Sag > maxSag)
+            var part = (BezierEdge)Part((double)i / steps, (i + 1.0) / steps);
+            if (tangent.Dot(next) < turn || part.Sag > maxSag || part.Weights.Max() > MostUneven * part.Weights.Min())
             {
                 return false;
             }

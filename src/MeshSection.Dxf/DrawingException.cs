@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Tags;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf;
@@ -21,8 +22,8 @@ public sealed class DrawingException : Exception
     /// <summary>What is wrong.</summary>
     public DrawingFault Fault { get; }
 
-    /// <summary>The line of the file concerned, from 1, if it is one.</summary>
-    public int? Line { get; init; }
+    /// <summary>The place in the file, if one is concerned.</summary>
+    public FilePlace? Place { get; init; }
 
     /// <summary>The group code of the value concerned, if it is one.</summary>
     public int? GroupCode { get; init; }

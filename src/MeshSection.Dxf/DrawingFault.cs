@@ -9,9 +9,6 @@ public enum DrawingFault
     /// <summary>The file is no DXF.</summary>
     NotDxf,
 
-    /// <summary>The file is a binary DXF.</summary>
-    BinaryDxf,
-
     /// <summary>The file is a DWG.</summary>
     Dwg,
 
@@ -29,6 +26,9 @@ public enum DrawingFault
 
     /// <summary>A layer was asked for that the drawing does not have.</summary>
     NoSuchLayer,
+
+    /// <summary>Blocks hold themselves, or come to too many entities.</summary>
+    BlocksUnusable,
 
     /// <summary>An entity does not lie parallel to the drawing's plane.</summary>
     TiltedEntity,

@@ -30,6 +30,9 @@ public enum NoteCode
     /// <summary>A polyline lacks its end mark, or has another number of vertices than it says.</summary>
     PolylineMended = 107,
 
+    /// <summary>A block lacks its end mark, or is there twice.</summary>
+    BlockMended = 108,
+
     /// <summary>The unit asked for is not the one that the drawing states.</summary>
     UnitOverridden = 201,
 
@@ -45,6 +48,12 @@ public enum NoteCode
     /// <summary>The coordinates are so far from the origin that few digits are left for the section.</summary>
     FewDigits = 205,
 
+    /// <summary>The unit follows from the system of units alone.</summary>
+    UnitAssumed = 206,
+
+    /// <summary>What is drawn lies in another plane than the drawing's.</summary>
+    OtherPlane = 207,
+
     /// <summary>An entity has no length.</summary>
     NoLength = 301,
 
@@ -59,6 +68,12 @@ public enum NoteCode
 
     /// <summary>A layer that is off, frozen or not plotted was read since it was asked for by name.</summary>
     HiddenLayerRead = 305,
+
+    /// <summary>A block that is to be put into the drawing is not in the file.</summary>
+    BlockMissing = 306,
+
+    /// <summary>A spline states only points that it runs through.</summary>
+    SplineInterpolated = 307,
 
     /// <summary>A gap between two ends was bridged.</summary>
     GapBridged = 401,
@@ -88,7 +103,7 @@ public sealed record DrawingNote(
 
     /// <summary>True for what was mended; false for what only calls for attention.</summary>
     public bool IsRepair => Code is NoteCode.NoEndOfFile or NoteCode.NoEndOfSection or NoteCode.BareEntities
-        or NoteCode.PolylineMended or NoteCode.NoLength or NoteCode.Sliver or NoteCode.GapBridged
+        or NoteCode.PolylineMended or NoteCode.BlockMended or NoteCode.NoLength or NoteCode.Sliver or NoteCode.GapBridged
         or NoteCode.PolylineClosed or NoteCode.DuplicateDropped;
 
     internal static DrawingNote About(NoteCode code, string message, params ReadOnlySpan<EntitySource> sources) =>

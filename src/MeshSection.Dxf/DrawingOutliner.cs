@@ -2,6 +2,7 @@ using System.Collections.Immutable;
 using MeshSection.Dxf.Curves;
 using MeshSection.Dxf.Entities;
 using MeshSection.Dxf.Loops;
+using MeshSection.Dxf.Placing;
 using MeshSection.Dxf.Selection;
 using MeshSection.Geometry;
 using MeshSection.Units;
@@ -27,18 +28,24 @@ public static class DrawingOutliner
     {
         ArgumentNullException.ThrowIfNull(drawing);
         ArgumentNullException.ThrowIfNull(options);
-        var selection = EntitySelection.Of(drawing, options.Layers);
-        List<DrawingNote> notes = [.. drawing.Notes, .. selection.Notes];
-        CheckUsable(selection);
-        var unit = Unit(drawing, options, selection.Used, notes);
-        var frame = LocalFrame.Of(selection.Used, unit);
-        NoteSize(frame, notes);
-        NoteHeights(selection.Used, frame, notes);
+        List<DrawingNote> notes = [.. drawing.Notes];
+        var selection = EntitySelection.Of(drawing, options, notes);
+        if (selection.Used.Count == 0)
+        {
+            throw OutlineFaults.NothingUsed(selection);
+        }
 
-        var pieces = PieceList.Of(selection.Used, frame, notes);
+        var plane = DrawingPlane.Of(selection.Used);
+        var drawn = selection.Used.ConvertAll(e => DrawnEntity.Of(e, plane));
+        var unit = Unit(drawing, options, drawn, notes);
+        var frame = LocalFrame.Of(drawn, unit);
+        NoteSize(frame, notes);
+        NotePlane(selection.Used, plane, frame, notes);
+
+        var pieces = PieceList.Of(drawn, frame, notes);
         if (pieces.Count == 0)
         {
-            throw OutlineFaults.AllWithoutLength(selection.Used[0]);
+            throw OutlineFaults.AllWithoutLength(selection.Used[0].Source);
         }
 
         var gap = JoinGap.Of(pieces, frame, options.Joining.MaxGap);
@@ -62,21 +69,7 @@ public static class DrawingOutliner
         return new DrawingOutline(outline, report, Sources(outline, loops));
     }
 
-    private static void CheckUsable(EntitySelection selection)
-    {
-        if (selection.Used.Count == 0)
-        {
-            throw OutlineFaults.NothingUsed(selection);
-        }
-
-        var tilted = selection.Used.FindAll(e => e is TiltedEntity);
-        if (tilted.Count > 0)
-        {
-            throw OutlineFaults.Tilted(tilted);
-        }
-    }
-
-    private static LengthUnit Unit(Drawing drawing, OutlineOptions options, List<Entity> used, List<DrawingNote> notes)
+    private static LengthUnit Unit(Drawing drawing, OutlineOptions options, List<DrawnEntity> used, List<DrawingNote> notes)
     {
         if (options.Unit is not { } given)
         {
@@ -117,16 +110,23 @@ public static class DrawingOutliner
         }
     }
 
-    private static void NoteHeights(List<Entity> used, LocalFrame frame, List<DrawingNote> notes)
+    private static void NotePlane(List<PlacedEntity> used, DrawingPlane plane, LocalFrame frame, List<DrawingNote> notes)
     {
-        var lowest = used.MinBy(e => e.Height)!;
-        var highest = used.MaxBy(e => e.Height)!;
-        if (highest.Height - lowest.Height > 1e-6 * frame.Extents.Diagonal)
+        if (plane.Name is { } name)
+        {
+            notes.Add(DrawingNote.About(NoteCode.OtherPlane, $"What is drawn lies in another plane than the drawing's: {name}."));
+            return;
+        }
+
+        var lowest = used.MinBy(plane.Height)!;
+        var highest = used.MaxBy(plane.Height)!;
+        var (low, high) = (plane.Height(lowest), plane.Height(highest));
+        if (high - low > 1e-6 * frame.Extents.Diagonal)
         {
             notes.Add(DrawingNote.About(
                 NoteCode.DifferentHeights,
-                $"Entities lie at heights from z = {Wording.Coordinate(lowest.Height)} ({lowest.Source.Name}) to z = " +
-                $"{Wording.Coordinate(highest.Height)} ({highest.Source.Name}); they were projected to the xy plane.",
+                $"Entities lie at heights from z = {Wording.Coordinate(low)} ({lowest.Source.Name}) to z = " +
+                $"{Wording.Coordinate(high)} ({highest.Source.Name}); they were projected to the xy plane.",
                 lowest.Source,
                 highest.Source));
         }

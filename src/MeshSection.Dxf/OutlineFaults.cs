@@ -3,6 +3,7 @@ using System.Globalization;
 using MeshSection.Dxf.Curves;
 using MeshSection.Dxf.Entities;
 using MeshSection.Dxf.Loops;
+using MeshSection.Dxf.Placing;
 using MeshSection.Dxf.Selection;
 using MeshSection.Geometry;
 using MeshSection.Units;
@@ -21,20 +22,37 @@ internal static class OutlineFaults
         DrawingFault.NoBoundary,
         selection.LeftOut.IsEmpty
             ? "The drawing has no entities. Make sure that the section is drawn in the model and was exported."
-            : "The drawing has nothing that an outline can be made of: no line, arc, circle or polyline is left. Left out: " +
+            : "The drawing has nothing that an outline can be made of: no line, curve, polyline or filled area is left. Left out: " +
                 string.Join("; ", selection.LeftOut.Take(8).Select(Described)) +
                 (selection.LeftOut.Length > 8 ? "; and more" : "") + "." + Unread(selection));
 
-    public static DrawingException AllWithoutLength(Entity first) => new(
+    public static DrawingException AllWithoutLength(EntitySource first) => new(
         DrawingFault.NoBoundary,
-        $"No entity has any length, from {first.Source} on. Draw the outline with lines, arcs, circles or polylines.")
-    { Places = [new EntityPlace(first.Source, null)] };
+        $"No entity has any length, from {first} on. Draw the outline with lines, arcs, curves or polylines.")
+    { Places = [new EntityPlace(first, null)] };
 
-    public static DrawingException Tilted(List<Entity> tilted) => new(
+    public static DrawingException Tilted(List<PlacedEntity> tilted) => new(
         DrawingFault.TiltedEntity,
         $"{Wording.Names(tilted.Select(t => t.Source))} {(tilted.Count == 1 ? "does" : "do")} not lie parallel to the " +
-        "drawing's xy plane, so that the true shape cannot be seen. Flatten the drawing, or leave them out with --layer.")
+        "drawing's xy plane, and what is drawn lies in no other plane, so that the true shape cannot be seen. Flatten the " +
+        "drawing, or leave them out with --layer or --ignore.")
     { Places = [.. tilted.Select(t => new EntityPlace(t.Source, null))] };
+
+    public static DrawingException BlockHoldsItself(EntitySource source, IEnumerable<string> chain) => new(
+        DrawingFault.BlocksUnusable,
+        $"{source} puts a block into itself: '{string.Join("' in '", chain)}'. Delete the insertion within the block.")
+    { Place = source.Place, Places = [new EntityPlace(source, null)] };
+
+    public static DrawingException BlocksTooDeep(EntitySource source, int deepest) => new(
+        DrawingFault.BlocksUnusable,
+        $"{source} puts a block into the drawing that holds blocks in blocks, more than {deepest} deep. Explode the outer ones.")
+    { Place = source.Place, Places = [new EntityPlace(source, null)] };
+
+    public static DrawingException TooManyEntities(EntitySource source, long most) => new(
+        DrawingFault.BlocksUnusable,
+        $"With {source} the blocks that are put into the drawing come to more than {most} entities. Make the array smaller, " +
+        "or delete what is no part of the section.")
+    { Place = source.Place, Places = [new EntityPlace(source, null)] };
 
     public static DrawingException UnitUnknown(Box extents) => new(
         DrawingFault.UnitUnknown,
@@ -76,7 +94,7 @@ internal static class OutlineFaults
         var places = met.Select(p => new EntityPlace(p.Entity.Source, at)).ToImmutableArray();
         var names = Wording.Names(met.Select(p => p.Entity.Source));
         var others = branches > 1 ? $" There are {branches} such points." : "";
-        if (met.TrueForAll(p => p.IsOfClosedEntity) && met.Select(p => p.Entity).Distinct().Count() > 1)
+        if (met.TrueForAll(p => p.Entity.IsClosed) && met.Select(p => p.Entity).Distinct().Count() > 1)
         {
             return new DrawingException(
                 DrawingFault.TouchingBoundaries,
@@ -160,6 +178,11 @@ internal static class OutlineFaults
         LeftOutReason.LayerNotPlotted => "layer not plotted",
         LeftOutReason.PaperSpace => "on a layout sheet",
         LeftOutReason.Invisible => "invisible",
+        LeftOutReason.LayerIgnored => "layer ignored",
+        LeftOutReason.ColourNotAsked => "colour not asked for",
+        LeftOutReason.FillBesideLines => "fill beside lines",
+        LeftOutReason.NoBar => "neither circle nor point on a layer of bars",
+        LeftOutReason.BlockMissing => "block missing",
         _ => throw new ArgumentOutOfRangeException(nameof(reason)),
     };
 

@@ -1,3 +1,5 @@
+using MeshSection.Dxf.Entities;
+using MeshSection.Geometry;
 using MeshSection.Units;
 
 namespace MeshSection.Dxf;
@@ -14,9 +16,35 @@ public sealed record OutlineOptions
     /// </summary>
     public IReadOnlyList<string> Layers { get; init; } = [];
 
+    /// <summary>The layers to leave out, by name or with wildcards.</summary>
+    public IReadOnlyList<string> Ignored { get; init; } = [];
+
+    /// <summary>The colours to read; empty to read every colour.</summary>
+    public IReadOnlyList<DrawingColour> Colours { get; init; } = [];
+
+    /// <summary>The layers whose circles and points are bars, not outline.</summary>
+    public IReadOnlyList<BarLayer> Bars { get; init; } = [];
+
+    /// <summary>
+    /// The layers whose closed boundaries are regions, in order: where two overlap, the later one has the place. Empty if
+    /// nesting alone decides what is material.
+    /// </summary>
+    public IReadOnlyList<string> Regions { get; init; } = [];
+
+    /// <summary>
+    /// Points in the drawing's axes and unit: what holds one of them is the section, and nothing else is. Empty to take
+    /// everything that nesting makes material.
+    /// </summary>
+    public IReadOnlyList<Point> Inside { get; init; } = [];
+
     /// <summary>How to join loose pieces.</summary>
     public Joining Joining { get; init; } = new();
 }
+
+/// <summary>Layers on which bars are drawn.</summary>
+/// <param name="Layers">Their name, or a pattern with wildcards.</param>
+/// <param name="Diameter">The diameter of bars drawn as points, in the drawing's unit; null if all are circles.</param>
+public sealed record BarLayer(string Layers, double? Diameter = null);
 
 /// <summary>How loose pieces are joined.</summary>
 public sealed record Joining

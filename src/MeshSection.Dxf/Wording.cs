@@ -1,5 +1,6 @@
 using System.Globalization;
 using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Tags;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf;
@@ -10,6 +11,9 @@ internal static class Wording
     /// <summary>A coordinate: ten digits, so that rounding in the last ones does not show.</summary>
     public static string Coordinate(double value) =>
         (value + 0.0).ToString("G10", CultureInfo.InvariantCulture);
+
+    /// <summary>A place at the beginning of a sentence.</summary>
+    public static string Capital(FilePlace place) => place.IsByte ? $"At {place}" : $"L{place.ToString()[1..]}";
 
     public static string At(Point p) => $"({Coordinate(p.X)}, {Coordinate(p.Y)})";
 

@@ -60,7 +60,7 @@ internal static class DxfText
 
     public static Drawing Read(string text) => Read(Encoding.Latin1.GetBytes(text));
 
-    public static Drawing Read(byte[] bytes) => new AsciiDxfReader().Read(new MemoryStream(bytes));
+    public static Drawing Read(byte[] bytes) => new DxfReader().Read(new MemoryStream(bytes));
 
     public static DrawingOutline Outline(string text, OutlineOptions? options = null) =>
         DrawingOutliner.Outline(Read(text), options ?? new OutlineOptions());

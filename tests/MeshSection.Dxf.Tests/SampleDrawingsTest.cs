@@ -67,7 +67,7 @@ public class SampleDrawingsTest
     private static DrawingOutline Outline(string name, string[] layers)
     {
         using var file = File.OpenRead(Path.Combine(Folder, name + ".dxf"));
-        var drawing = new AsciiDxfReader().Read(file);
+        var drawing = new DxfReader().Read(file);
         var known = layers.Where(l => l.Contains('*') || drawing.Layers.Any(k => k.Name == l)).ToArray();
         return DrawingOutliner.Outline(drawing, new OutlineOptions { Layers = known });
     }

@@ -78,7 +78,7 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
         using var stream = InputFiles.Open(path);
         try
         {
-            var drawing = new AsciiDxfReader().Read(stream);
+            var drawing = new DxfReader().Read(stream);
             var own = unit ?? drawing.Unit;
             return DrawingOutliner.Outline(drawing, new OutlineOptions
             {

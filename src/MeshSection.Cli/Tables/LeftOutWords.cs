@@ -17,6 +17,11 @@ internal static class LeftOutWords
         LeftOutReason.LayerNotPlotted => "layer is not plotted",
         LeftOutReason.PaperSpace => "on a layout sheet",
         LeftOutReason.Invisible => "marked invisible",
+        LeftOutReason.LayerIgnored => "layer ignored, as asked for",
+        LeftOutReason.ColourNotAsked => "colour not asked for",
+        LeftOutReason.FillBesideLines => "fill beside the lines that bound it",
+        LeftOutReason.NoBar => "neither circle nor point, on a layer of bars",
+        LeftOutReason.BlockMissing => "its block is not in the file",
         _ => throw new ArgumentOutOfRangeException(nameof(reason)),
     };
 }

@@ -1,4 +1,3 @@
-using MeshSection.Dxf.Entities;
 using MeshSection.Geometry;
 using MeshSection.Units;
 
@@ -27,13 +26,13 @@ internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
     /// <summary>The spacing of the numbers by which the drawing states its farthest coordinate.</summary>
     public double Spacing => SpacingAt(Farthest(Extents));
 
-    public static LocalFrame Of(List<Entity> entities, LengthUnit unit)
+    public static LocalFrame Of(List<DrawnEntity> entities, LengthUnit unit)
     {
         var anchor = Anchor(entities);
         var box = BoundsFrom(anchor, entities);
         if (box == Box.Empty)
         {
-            throw OutlineFaults.AllWithoutLength(entities[0]);
+            throw OutlineFaults.AllWithoutLength(entities[0].Placed.Source);
         }
 
         var size = box.Diagonal * unit.Millimetres;
@@ -67,28 +66,28 @@ internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
     }
 
     /// <summary>The least coordinates that the entities state.</summary>
-    private static Point Anchor(List<Entity> entities)
+    private static Point Anchor(List<DrawnEntity> entities)
     {
         var box = Box.Empty;
-        foreach (var entity in entities)
+        foreach (var curve in entities.SelectMany(e => e.Curves))
         {
-            switch (entity)
+            switch (curve)
             {
-                case LineEntity line:
-                    box = box.With(line.Start).With(line.End);
-                    break;
-                case ArcEntity arc:
-                    box = box.With(arc.Centre);
-                    break;
-                case CircleEntity circle:
-                    box = box.With(circle.Centre);
-                    break;
-                case PolylineEntity polyline:
-                    foreach (var vertex in polyline.Vertices)
+                case StraightCurve straight:
+                    foreach (var point in straight.Points)
                     {
-                        box = box.With(vertex.Point);
+                        box = box.With(point);
                     }
 
+                    break;
+                case BulgedCurve bulged:
+                    box = box.With(bulged.Start).With(bulged.End);
+                    break;
+                case EllipticCurve elliptic:
+                    box = box.With(elliptic.Centre);
+                    break;
+                case FreeCurve free:
+                    box = box.With(free.Controls[0]).With(free.Controls[^1]);
                     break;
             }
         }
@@ -96,15 +95,15 @@ internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
         return new Point(box.MinX, box.MinY);
     }
 
-    private static Box BoundsFrom(Point anchor, List<Entity> entities)
+    private static Box BoundsFrom(Point anchor, List<DrawnEntity> entities)
     {
         var frame = new LocalFrame(anchor, default, 1);
         var box = Box.Empty;
         var edges = new List<Edge>();
-        foreach (var entity in entities)
+        foreach (var curve in entities.SelectMany(e => e.Curves))
         {
             edges.Clear();
-            EntityEdges.Append(entity, frame, edges);
+            CurveEdges.Append(curve, frame, edges);
             foreach (var edge in edges)
             {
                 box = box.With(edge.Bounds);

@@ -20,6 +20,9 @@ internal sealed class HeaderReader(TagReader tags)
     /// <summary>The unit of $INSUNITS.</summary>
     public LengthUnit? Unit { get; private set; }
 
+    /// <summary>True if $MEASUREMENT says metric, false if it says English, null if it is missing.</summary>
+    public bool? IsMetric { get; private set; }
+
     /// <summary>The value of $INSUNITS if the format does not know it.</summary>
     public int? UnknownUnitCode { get; private set; }
 
@@ -38,6 +41,12 @@ internal sealed class HeaderReader(TagReader tags)
             else if (tags.Is(9, "$INSUNITS"u8) && Value(70))
             {
                 ReadUnit();
+            }
+
+            else if (tags.Is(9, "$MEASUREMENT"u8) && Value(70))
+            {
+                IsMetric = tags.TryInteger(out var system) ? system switch { 0 => false, 1 => true, _ => null }
+                    : throw ReadingFaults.Number(tags, "$MEASUREMENT");
             }
 
             if (!tags.HasTag || tags.Code == 0)

@@ -31,6 +31,7 @@ internal sealed class LayerTableReader(TagReader tags, TagText text)
         var isOff = false;
         var isFrozen = false;
         var isPlotted = true;
+        var colour = DrawingColour.Plain;
         while (tags.Read() && tags.Code != 0)
         {
             switch (tags.Code)
@@ -40,9 +41,13 @@ internal sealed class LayerTableReader(TagReader tags, TagText text)
                     break;
                 case 62:
                     isOff = Integer(name) < 0;
+                    colour = colour with { Index = Math.Abs(Integer(name)) };
                     break;
                 case 70:
                     isFrozen = (Integer(name) & 1) != 0;
+                    break;
+                case 420:
+                    colour = colour with { Rgb = Integer(name) & 0xFFFFFF };
                     break;
                 case 290:
                     isPlotted = Integer(name) != 0;
@@ -51,7 +56,7 @@ internal sealed class LayerTableReader(TagReader tags, TagText text)
         }
 
         // The layer of the points that dimensions hang on never plots, whatever the table says.
-        return new Layer(name, isOff, isFrozen, isPlotted && !name.Equals("DEFPOINTS", StringComparison.OrdinalIgnoreCase));
+        return new Layer(name, isOff, isFrozen, isPlotted && !name.Equals("DEFPOINTS", StringComparison.OrdinalIgnoreCase), colour);
     }
 
     private int Integer(string layer) => tags.TryInteger(out var number)

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+using MeshSection.Dxf.Space;
 using MeshSection.Dxf.Tags;
 
 namespace MeshSection.Dxf.Entities;
@@ -16,12 +18,12 @@ internal sealed class PolylineReader(TagReader tags, EntityFields fields, List<D
     {
         var source = fields.Source;
         var flags = fields.Flags;
-        var plane = (flags & IsSpatial) != 0 ? new Plane(false) : Plane.Of(fields.Normal);
-        var height = fields.Number(30) ?? 0;
+        var normal = fields.Normal;
+        var elevation = fields.Number(30) ?? 0;
         var isMesh = (flags & IsMesh) != 0;
-        var vertices = new List<PolylineVertex>();
-        var lowest = double.PositiveInfinity;
-        var highest = double.NegativeInfinity;
+        var isSpatial = (flags & IsSpatial) != 0;
+        var points = ImmutableArray.CreateBuilder<SpacePoint>();
+        var vertices = ImmutableArray.CreateBuilder<PolylineVertex>();
         while (tags.Is(0, "VERTEX"u8))
         {
             fields.Read("VERTEX", hasShape: !isMesh);
@@ -30,37 +32,27 @@ internal sealed class PolylineReader(TagReader tags, EntityFields fields, List<D
                 continue;
             }
 
-            var z = fields.Number(30) ?? 0;
-            lowest = Math.Min(lowest, z);
-            highest = Math.Max(highest, z);
-            vertices.Add(new PolylineVertex(fields.Point(10, "vertex coordinates"), fields.Number(42) ?? 0));
-        }
-
-        ReadEnd(source);
-        if (isMesh)
-        {
-            return new UnreadEntity(source with { Kind = "POLYLINE (mesh)" });
-        }
-
-        if ((flags & IsSpatial) != 0)
-        {
-            height = vertices.Count > 0 ? lowest : 0;
-            if (highest - lowest > Plane.Flatness * Extent(vertices))
+            if (isSpatial)
             {
-                return new TiltedEntity(source);
+                points.Add(fields.SpacePoint(10, "vertex coordinates"));
+            }
+            else
+            {
+                vertices.Add(new PolylineVertex(fields.Point(10, "vertex coordinates"), fields.Number(42) ?? 0));
             }
         }
 
-        return plane is { } flat
-            ? flat.Polyline(source, flat.Height(height), vertices, (flags & IsClosed) != 0)
-            : new TiltedEntity(source);
+        ReadEnd(source);
+        return isMesh ? new UnreadEntity(source with { Kind = "POLYLINE (mesh)" })
+            : isSpatial ? new SpatialPolylineEntity(source, points.ToImmutable(), (flags & IsClosed) != 0)
+            : new PolylineEntity(source, normal, elevation, vertices.ToImmutable(), (flags & IsClosed) != 0);
     }
 
     private void ReadEnd(EntitySource source)
     {
         if (!tags.HasTag)
         {
-            throw ReadingFaults.CutEntity(tags.Line, source, "its end mark (SEQEND)");
+            throw ReadingFaults.CutEntity(tags.Place, source, "its end mark (SEQEND)");
         }
 
         if (tags.Is(0, "SEQEND"u8))
@@ -70,17 +62,6 @@ internal sealed class PolylineReader(TagReader tags, EntityFields fields, List<D
         }
 
         notes.Add(DrawingNote.About(
-            NoteCode.PolylineMended, $"{source} has no end mark (SEQEND) before line {tags.Line}.", source));
-    }
-
-    private static double Extent(List<PolylineVertex> vertices)
-    {
-        var extent = 0.0;
-        foreach (var vertex in vertices)
-        {
-            extent = Math.Max(extent, vertex.Point.DistanceTo(vertices[0].Point));
-        }
-
-        return extent;
+            NoteCode.PolylineMended, $"{source} has no end mark (SEQEND) before {tags.Place}.", source));
     }
 }

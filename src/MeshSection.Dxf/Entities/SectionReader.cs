@@ -1,5 +1,6 @@
 using System.Collections.Immutable;
 using MeshSection.Dxf.Tags;
+using MeshSection.Units;
 
 namespace MeshSection.Dxf.Entities;
 
@@ -9,6 +10,7 @@ internal sealed class SectionReader(TagReader tags)
     private readonly HeaderReader _header = new(tags);
     private readonly List<DrawingNote> _notes = [];
     private readonly List<Layer> _layers = [];
+    private readonly Dictionary<string, Block> _blocks = new(StringComparer.OrdinalIgnoreCase);
     private readonly ImmutableArray<Entity>.Builder _entities = ImmutableArray.CreateBuilder<Entity>();
     private TagText? _text;
     private bool _sawEntities;
@@ -25,7 +27,7 @@ internal sealed class SectionReader(TagReader tags)
 
         if (tags.Code != 0)
         {
-            throw ReadingFaults.NotDxf(tags.Line - 1, $"'{tags.Code}'");
+            throw ReadingFaults.NotDxf(tags.CodePlace, $"'{tags.Code}'");
         }
 
         while (tags.HasTag && !tags.Is(0, "EOF"u8))
@@ -37,7 +39,7 @@ internal sealed class SectionReader(TagReader tags)
             else if (tags.Code == 0 && !tags.Is(0, "ENDSEC"u8))
             {
                 _notes.Add(DrawingNote.About(
-                    NoteCode.BareEntities, $"Entities from line {tags.Line} on stand in no section; they were read."));
+                    NoteCode.BareEntities, $"Entities from {tags.Place} on stand in no section; they were read."));
                 ReadEntities();
             }
             else
@@ -48,15 +50,21 @@ internal sealed class SectionReader(TagReader tags)
 
         CheckEnd();
         NoteAssumptions();
-        return new Drawing(_header.Release, _header.Unit, AllLayers(), _entities.ToImmutable(), [.. _notes]);
+        return new Drawing(
+            _header.Release,
+            _header.Unit ?? AssumedUnit(),
+            AllLayers(),
+            _blocks.ToImmutableDictionary(StringComparer.OrdinalIgnoreCase),
+            _entities.ToImmutable(),
+            [.. _notes]);
     }
 
     private void ReadSection()
     {
-        var line = tags.Line;
+        var place = tags.Place;
         tags.Read();
         var name = tags.HasTag && tags.Code == 2 ? NameOf(tags) : "";
-        _openSection = name.Length > 0 ? name : $"at line {line}";
+        _openSection = name.Length > 0 ? name : $"at {place}";
         switch (name)
         {
             case "HEADER":
@@ -64,6 +72,9 @@ internal sealed class SectionReader(TagReader tags)
                 break;
             case "TABLES":
                 new LayerTableReader(tags, Text).Read(_layers);
+                break;
+            case "BLOCKS":
+                ReadBlocks();
                 break;
             case "ENTITIES":
                 ReadEntities();
@@ -85,7 +96,7 @@ internal sealed class SectionReader(TagReader tags)
         else if (tags.HasTag)
         {
             _notes.Add(DrawingNote.About(
-                NoteCode.NoEndOfSection, $"The section {_openSection} has no end mark (ENDSEC) before line {tags.Line}."));
+                NoteCode.NoEndOfSection, $"The section {_openSection} has no end mark (ENDSEC) before {tags.Place}."));
             _openSection = null;
         }
     }
@@ -96,13 +107,30 @@ internal sealed class SectionReader(TagReader tags)
         var reader = new EntityReader(tags, Text, _notes);
         while (!AtSectionEnd(tags))
         {
-            if (tags.Code == 0)
-            {
-                _entities.Add(reader.Read());
-            }
-            else
+            if (tags.Code != 0)
             {
                 tags.Read();
+            }
+            else if (reader.Read() is { } entity)
+            {
+                _entities.Add(entity);
+            }
+        }
+    }
+
+    private void ReadBlocks()
+    {
+        var reader = new BlockReader(tags, Text, _notes);
+        while (!AtSectionEnd(tags))
+        {
+            if (!tags.Is(0, "BLOCK"u8))
+            {
+                tags.Read();
+            }
+            else if (reader.Read() is var block && !_blocks.TryAdd(block.Name, block))
+            {
+                _notes.Add(DrawingNote.About(
+                    NoteCode.BlockMended, $"The block '{block.Name}' is there twice; the first was taken."));
             }
         }
     }
@@ -114,7 +142,7 @@ internal sealed class SectionReader(TagReader tags)
             if (tags.HasMoreText())
             {
                 _notes.Add(DrawingNote.About(
-                    NoteCode.TextAfterEnd, $"What follows the end mark (EOF) at line {tags.Line} was not read."));
+                    NoteCode.TextAfterEnd, $"What follows the end mark (EOF) at {tags.Place} was not read."));
             }
 
             return;
@@ -122,18 +150,34 @@ internal sealed class SectionReader(TagReader tags)
 
         if (tags.UnterminatedValue is { } value && value != "ENDSEC")
         {
-            throw ReadingFaults.CutValue(tags.Line, $"'{value}'");
+            throw ReadingFaults.CutValue(tags.Place, $"'{value}'");
         }
 
         if (!_sawEntities)
         {
-            throw ReadingFaults.CutSection(tags.Line, _openSection ?? "before ENTITIES");
+            throw ReadingFaults.CutSection(tags.Place, _openSection ?? "before ENTITIES");
         }
 
         var last = _entities.Count > 0 ? $" The last entity read is {_entities[^1].Source.Name}." : "";
         _notes.Add(DrawingNote.About(
             NoteCode.NoEndOfFile,
-            $"The file ends at line {tags.Line} without the end mark (EOF): make sure that nothing was cut off.{last}"));
+            $"The file ends at {tags.Place} without the end mark (EOF): make sure that nothing was cut off.{last}"));
+    }
+
+    /// <summary>A drawing without a unit may still say whether it is metric.</summary>
+    private LengthUnit? AssumedUnit()
+    {
+        if (_header.IsMetric is not { } isMetric)
+        {
+            return null;
+        }
+
+        var unit = isMetric ? LengthUnit.Millimetre : LengthUnit.Inch;
+        _notes.Add(DrawingNote.About(
+            NoteCode.UnitAssumed,
+            $"The drawing does not state its unit, only that it is {(isMetric ? "metric" : "in English units")} ($MEASUREMENT): it " +
+            $"was read in {unit.Symbol}. If that is wrong, say which with --unit."));
+        return unit;
     }
 
     private void NoteAssumptions()
@@ -164,11 +208,11 @@ internal sealed class SectionReader(TagReader tags)
     private ImmutableArray<Layer> AllLayers()
     {
         var names = new HashSet<string>(_layers.Select(l => l.Name), StringComparer.OrdinalIgnoreCase);
-        foreach (var entity in _entities)
+        foreach (var entity in _entities.Concat(_blocks.Values.SelectMany(b => b.Entities)))
         {
             if (names.Add(entity.Source.Layer))
             {
-                _layers.Add(new Layer(entity.Source.Layer, IsOff: false, IsFrozen: false, IsPlotted: true));
+                _layers.Add(new Layer(entity.Source.Layer, IsOff: false, IsFrozen: false, IsPlotted: true, DrawingColour.Plain));
             }
         }
 

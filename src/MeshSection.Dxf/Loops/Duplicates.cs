@@ -1,6 +1,5 @@
 using MeshSection.Dxf.Curves;
-using MeshSection.Dxf.Entities;
-using MeshSection.Geometry;
+using MeshSection.Dxf.Placing;
 
 namespace MeshSection.Dxf.Loops;
 
@@ -17,7 +16,7 @@ internal static class Duplicates
         bool[] dropped,
         EndNodes nodes,
         double tolerance,
-        Dictionary<(Entity Dropped, Entity Kept), int> found)
+        Dictionary<(PlacedEntity Dropped, PlacedEntity Kept), int> found)
     {
         var candidates = new List<Candidate>(pieces.Count);
         for (var i = 0; i < pieces.Count; i++)
@@ -45,9 +44,11 @@ internal static class Duplicates
     }
 
     /// <summary>How far the piece rises over its chord, to the right of the way from the first of its nodes to the other.</summary>
-    private static double Rise(Piece piece, bool isForward) => piece.Edge is ArcEdge arc
-        ? 0.5 * arc.Chord.Length * (isForward ? arc.Bulge : -arc.Bulge)
-        : 0;
+    private static double Rise(Piece piece, bool isForward)
+    {
+        var sag = piece.Edge.Sag;
+        return sag > 0 && piece.Edge.CapArea > 0 != isForward ? -sag : sag;
+    }
 
     private readonly record struct Candidate(int From, int To, double Rise, int Piece) : IComparable<Candidate>
     {

@@ -23,8 +23,8 @@ internal sealed class EndNodes
         _ends = new int[pieces.Count];
         for (var i = 0; i < pieces.Count; i++)
         {
-            _starts[i] = Number(pieces[i].Edge.Start, pieces[i].EndsAreStated);
-            _ends[i] = Number(pieces[i].Edge.End, pieces[i].EndsAreStated);
+            _starts[i] = Number(pieces[i].Edge.Start, pieces[i].Entity.EndsAreStated);
+            _ends[i] = Number(pieces[i].Edge.End, pieces[i].Entity.EndsAreStated);
         }
 
         _parents = new int[_points.Count];

@@ -1,4 +1,4 @@
-using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Placing;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf.Loops;
@@ -6,7 +6,7 @@ namespace MeshSection.Dxf.Loops;
 /// <summary>A closed chain of edges and the entity that each came from.</summary>
 /// <param name="Edges">The edges in running order.</param>
 /// <param name="Entities">The entity of each edge.</param>
-internal sealed record Loop(IReadOnlyList<Edge> Edges, IReadOnlyList<Entity> Entities)
+internal sealed record Loop(IReadOnlyList<Edge> Edges, IReadOnlyList<PlacedEntity> Entities)
 {
     /// <summary>
     /// The same loop begun at its leftmost corner (the lowest of those), so that where the drawing began it does not

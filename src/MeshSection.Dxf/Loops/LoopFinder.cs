@@ -1,5 +1,5 @@
 using MeshSection.Dxf.Curves;
-using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Placing;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf.Loops;
@@ -44,7 +44,7 @@ internal sealed class LoopFinder
     {
         var finder = new LoopFinder(pieces, frame, gap, notes);
         finder.MergeSlivers();
-        var duplicates = new Dictionary<(Entity, Entity), int>();
+        var duplicates = new Dictionary<(PlacedEntity, PlacedEntity), int>();
         Duplicates.Drop(pieces, finder._dropped, finder._nodes, 0, duplicates);
         finder.BridgeGaps();
         Duplicates.Drop(pieces, finder._dropped, finder._nodes, gap.Length, duplicates);
@@ -130,7 +130,7 @@ internal sealed class LoopFinder
         return places;
     }
 
-    private void NoteDuplicates(Dictionary<(Entity Dropped, Entity Kept), int> duplicates)
+    private void NoteDuplicates(Dictionary<(PlacedEntity Dropped, PlacedEntity Kept), int> duplicates)
     {
         foreach (var ((dropped, kept), count) in duplicates)
         {
@@ -192,7 +192,7 @@ internal sealed class LoopFinder
             }
 
             var edges = new List<Edge>();
-            var entities = new List<Entity>();
+            var entities = new List<PlacedEntity>();
             var piece = first;
             var from = _nodes.Start(first);
             while (!taken[piece])
@@ -200,7 +200,7 @@ internal sealed class LoopFinder
                 taken[piece] = true;
                 var isForward = _nodes.Start(piece) == from;
                 var to = isForward ? _nodes.End(piece) : _nodes.Start(piece);
-                edges.Add(Between(places[from], places[to], _pieces[piece].Edge, isForward));
+                edges.Add((isForward ? _pieces[piece].Edge : _pieces[piece].Edge.Reversed()).Between(places[from], places[to]));
                 entities.Add(_pieces[piece].Entity);
                 piece = ends.Piece(to, 0) == piece ? ends.Piece(to, 1) : ends.Piece(to, 0);
                 from = to;
@@ -214,9 +214,10 @@ internal sealed class LoopFinder
         return loops;
     }
 
-    private void NoteClosing(List<Entity> entities)
+    private void NoteClosing(List<PlacedEntity> entities)
     {
-        if (entities[0] is PolylineEntity { IsClosed: false } polyline && entities.TrueForAll(e => ReferenceEquals(e, polyline)))
+        var polyline = entities[0];
+        if (polyline.IsOpenPolyline && entities.TrueForAll(e => ReferenceEquals(e, polyline)))
         {
             _notes.Add(DrawingNote.About(
                 NoteCode.PolylineClosed,
@@ -224,8 +225,4 @@ internal sealed class LoopFinder
                 polyline.Source));
         }
     }
-
-    private static Edge Between(Point start, Point end, Edge drawn, bool isForward) => drawn is ArcEdge arc
-        ? new ArcEdge(start, end, isForward ? arc.Bulge : -arc.Bulge)
-        : new LineEdge(start, end);
 }

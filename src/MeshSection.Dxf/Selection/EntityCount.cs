@@ -29,6 +29,21 @@ public enum LeftOutReason
 
     /// <summary>They are marked as invisible.</summary>
     Invisible,
+
+    /// <summary>Their layer was asked to be left out.</summary>
+    LayerIgnored,
+
+    /// <summary>They have a colour that was not asked for.</summary>
+    ColourNotAsked,
+
+    /// <summary>They fill an area, and lines are there to bound the section.</summary>
+    FillBesideLines,
+
+    /// <summary>They lie on a layer of bars and are neither circles nor points.</summary>
+    NoBar,
+
+    /// <summary>Their block is not in the file.</summary>
+    BlockMissing,
 }
 
 /// <summary>How many entities of one kind on one layer were used, or left out for one reason.</summary>

@@ -1,96 +1,106 @@
 using System.Collections.Immutable;
 using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Placing;
 
 namespace MeshSection.Dxf.Selection;
 
-/// <summary>Divides the entities of a drawing into those that make the outline and those left out.</summary>
+/// <summary>Divides the entities of a drawing into those that make the outline, bars, and those left out.</summary>
 internal sealed class EntitySelection
 {
-    private EntitySelection(
-        List<Entity> used, ImmutableArray<EntityCount> usedCounts, ImmutableArray<EntityCount> leftOut, List<DrawingNote> notes)
+    private readonly Dictionary<(string Kind, string Layer, LeftOutReason Reason), int> _counts = [];
+
+    private EntitySelection()
     {
-        Used = used;
-        UsedCounts = usedCounts;
-        LeftOut = leftOut;
-        Notes = notes;
     }
 
-    public List<Entity> Used { get; }
+    /// <summary>What bounds the section.</summary>
+    public List<PlacedEntity> Used { get; private set; } = [];
 
-    public ImmutableArray<EntityCount> UsedCounts { get; }
+    /// <summary>True if what bounds it are filled areas, since there are no lines.</summary>
+    public bool IsOfFills { get; private set; }
 
-    public ImmutableArray<EntityCount> LeftOut { get; }
+    /// <summary>Circles and points on layers of bars, with the diameter of those drawn as points.</summary>
+    public List<(PlacedEntity Placed, double? Diameter)> Bars { get; } = [];
 
-    public List<DrawingNote> Notes { get; }
+    /// <summary>The entities used, by kind and layer.</summary>
+    public ImmutableArray<EntityCount> UsedCounts { get; private set; }
 
-    public static EntitySelection Of(Drawing drawing, IReadOnlyList<string> layers)
+    /// <summary>The entities left out, by reason, layer and kind.</summary>
+    public ImmutableArray<EntityCount> LeftOut { get; private set; }
+
+    public static EntitySelection Of(Drawing drawing, OutlineOptions options, List<DrawingNote> notes)
     {
-        var notes = new List<DrawingNote>();
-        var layerReasons = LayerReasons(drawing, layers, notes);
-        var used = new List<Entity>();
-        var counts = new Dictionary<(string Kind, string Layer, LeftOutReason Reason), int>();
-        foreach (var entity in drawing.Entities)
+        var rules = new LayerRules(drawing, options, notes);
+        var selection = new EntitySelection();
+        var fills = new List<PlacedEntity>();
+        foreach (var placed in BlockExpansion.Of(drawing, notes))
         {
-            var source = entity.Source;
-            var reason = source.IsOnPaper ? LeftOutReason.PaperSpace
-                : source.IsInvisible ? LeftOutReason.Invisible
-                : layerReasons[source.Layer] is not LeftOutReason.None and var hidden ? hidden
-                : entity is not UnreadEntity ? LeftOutReason.None
-                : EntityKinds.Advice(source.Kind) is null ? LeftOutReason.Annotation
-                : LeftOutReason.KindNotRead;
-            var key = (source.Kind, source.Layer, reason);
-            counts[key] = counts.GetValueOrDefault(key) + 1;
-            if (reason == LeftOutReason.None)
+            var reason = Reason(placed, rules, options);
+            if (reason != LeftOutReason.None)
             {
-                used.Add(entity);
+                selection.Count(placed, reason);
+            }
+            else if (rules.Bar(placed.Source.Layer) is { } bar)
+            {
+                selection.Bars.Add((placed, placed.Entity is PointEntity ? bar.Diameter : null));
+                selection.Count(placed, LeftOutReason.None);
+            }
+            else
+            {
+                (placed.Entity is FillEntity ? fills : selection.Used).Add(placed);
             }
         }
 
-        var sorted = counts
+        selection.Settle(fills);
+        notes.AddRange(selection.LeftOut.Where(c => c.Reason == LeftOutReason.KindNotRead).Select(NotRead));
+        return selection;
+    }
+
+    private static LeftOutReason Reason(PlacedEntity placed, LayerRules rules, OutlineOptions options)
+    {
+        var source = placed.Source;
+        var isBar = rules.Bar(source.Layer) is not null;
+        return source.IsOnPaper ? LeftOutReason.PaperSpace
+            : source.IsInvisible ? LeftOutReason.Invisible
+            : rules.Of(source) is not LeftOutReason.None and var hidden ? hidden
+            : placed.Entity is UnreadEntity ? ReasonOfUnread(source.Kind)
+            : !isBar && options.Colours.Count > 0 && !options.Colours.Contains(rules.Colour(source)) ? LeftOutReason.ColourNotAsked
+            : isBar ? (placed.Entity is CircleEntity or PointEntity ? LeftOutReason.None : LeftOutReason.NoBar)
+            : placed.Entity is PointEntity ? LeftOutReason.Annotation
+            : LeftOutReason.None;
+    }
+
+    private static LeftOutReason ReasonOfUnread(string kind) => kind == "INSERT" ? LeftOutReason.BlockMissing
+        : EntityKinds.Advice(kind) is null ? LeftOutReason.Annotation
+        : LeftOutReason.KindNotRead;
+
+    /// <summary>Fills bound the section only if no lines do: mostly they repeat the lines around them, and coarsely.</summary>
+    private void Settle(List<PlacedEntity> fills)
+    {
+        IsOfFills = Used.Count == 0 && fills.Count > 0;
+        Used = IsOfFills ? fills : Used;
+        Used.ForEach(u => Count(u, LeftOutReason.None));
+        if (!IsOfFills)
+        {
+            fills.ForEach(f => Count(f, LeftOutReason.FillBesideLines));
+        }
+
+        var sorted = _counts
             .Select(c => new EntityCount(c.Key.Kind, c.Key.Layer, c.Key.Reason, c.Value))
             .OrderBy(c => c.Reason).ThenBy(c => c.Layer, StringComparer.Ordinal).ThenBy(c => c.Kind, StringComparer.Ordinal)
             .ToImmutableArray();
-        ImmutableArray<EntityCount> leftOut = [.. sorted.Where(c => c.Reason != LeftOutReason.None)];
-        notes.AddRange(leftOut.Where(c => c.Reason == LeftOutReason.KindNotRead).Select(NotRead));
-        return new EntitySelection(used, [.. sorted.Where(c => c.Reason == LeftOutReason.None)], leftOut, notes);
+        UsedCounts = [.. sorted.Where(c => c.Reason == LeftOutReason.None)];
+        LeftOut = [.. sorted.Where(c => c.Reason != LeftOutReason.None)];
+    }
+
+    private void Count(PlacedEntity placed, LeftOutReason reason)
+    {
+        var key = (placed.Source.Kind, placed.Source.Layer, reason);
+        _counts[key] = _counts.GetValueOrDefault(key) + 1;
     }
 
     private static DrawingNote NotRead(EntityCount count) => DrawingNote.About(
         NoteCode.KindNotRead,
         $"{count.Count} {count.Kind} on layer '{count.Layer}' not read: such entities are not supported. If they are " +
         $"part of the outline, {EntityKinds.Advice(count.Kind)}.");
-
-    private static Dictionary<string, LeftOutReason> LayerReasons(
-        Drawing drawing, IReadOnlyList<string> layers, List<DrawingNote> notes)
-    {
-        var patterns = layers.Select(l => new LayerPattern(l)).ToArray();
-        for (var i = 0; i < patterns.Length; i++)
-        {
-            if (!drawing.Layers.Any(l => patterns[i].Matches(l.Name)))
-            {
-                throw OutlineFaults.NoSuchLayer(layers[i], drawing.Layers);
-            }
-        }
-
-        var reasons = new Dictionary<string, LeftOutReason>(StringComparer.OrdinalIgnoreCase);
-        foreach (var layer in drawing.Layers)
-        {
-            var matching = patterns.Where(p => p.Matches(layer.Name)).ToArray();
-            var isNamed = matching.Any(p => p.IsFullName);
-            reasons[layer.Name] = patterns.Length > 0 && matching.Length == 0 ? LeftOutReason.LayerNotAsked
-                : isNamed ? LeftOutReason.None
-                : layer.IsFrozen ? LeftOutReason.LayerFrozen
-                : layer.IsOff ? LeftOutReason.LayerOff
-                : !layer.IsPlotted ? LeftOutReason.LayerNotPlotted
-                : LeftOutReason.None;
-            if (isNamed && layer.IsHidden)
-            {
-                notes.Add(DrawingNote.About(
-                    NoteCode.HiddenLayerRead,
-                    $"The layer '{layer.Name}' is off, frozen or not plotted; it was read since it was asked for by name."));
-            }
-        }
-
-        return reasons;
-    }
 }

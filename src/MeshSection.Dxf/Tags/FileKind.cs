@@ -1,17 +1,10 @@
 namespace MeshSection.Dxf.Tags;
 
-/// <summary>Tells the files that people mistake for ASCII DXF by their first bytes.</summary>
+/// <summary>Tells the files that people mistake for DXF by their first bytes.</summary>
 internal static class FileKind
 {
-    private static ReadOnlySpan<byte> BinarySentinel => "AutoCAD Binary DXF\r\n\u001a\0"u8;
-
     public static void Check(ReadOnlySpan<byte> head)
     {
-        if (head.StartsWith(BinarySentinel))
-        {
-            throw ReadingFaults.Binary();
-        }
-
         if (head.Length >= 6 && head.StartsWith("AC10"u8) && IsDigit(head[4]) && IsDigit(head[5]))
         {
             throw ReadingFaults.Dwg();

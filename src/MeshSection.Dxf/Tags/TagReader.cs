@@ -1,54 +1,42 @@
-using System.Buffers.Text;
-using System.Globalization;
-using System.Text;
-
 namespace MeshSection.Dxf.Tags;
 
 /// <summary>
-/// Reads an ASCII DXF as a stream of tags: a line with a group code, a line with a value. The current tag stays until
-/// the next one is read; its value is a view into the buffer.
+/// A DXF as a stream of tags: a group code and a value. The current tag stays until the next one is read; its value is a
+/// view into a buffer.
 /// </summary>
-internal sealed class TagReader
+internal abstract class TagReader
 {
-    private const int LongestLine = 1 << 20;
-
-    private readonly Stream _stream;
-    private byte[] _buffer = new byte[1 << 16];
-    private int _next;
-    private int _end;
-    private bool _streamIsRead;
-    private bool _lineFeedMayFollow;
-    private bool _lineIsTerminated;
-    private bool _anyTag;
-    private int _lines;
-    private int _valueStart;
-    private int _valueLength;
-
-    public TagReader(Stream stream)
+    /// <summary>A reader of the form that the first bytes tell.</summary>
+    public static TagReader Of(Stream stream)
     {
-        _stream = stream;
-        Fill();
-        FileKind.Check(_buffer.AsSpan(0, _end));
-        HasByteOrderMark = _buffer.AsSpan(0, _end).StartsWith((ReadOnlySpan<byte>)[0xEF, 0xBB, 0xBF]);
-        _next = HasByteOrderMark ? 3 : 0;
+        var head = new byte[BinaryTags.Sentinel.Length];
+        var length = stream.ReadAtLeast(head, head.Length, throwOnEndOfStream: false);
+        FileKind.Check(head.AsSpan(0, length));
+        return head.AsSpan(0, length).SequenceEqual(BinaryTags.Sentinel)
+            ? new BinaryTags(stream)
+            : new AsciiTags(head.AsSpan(0, length), stream);
     }
 
-    public bool HasByteOrderMark { get; }
+    /// <summary>True if the file begins with the mark of UTF-8.</summary>
+    public virtual bool HasByteOrderMark => false;
 
     /// <summary>False before the first tag and at the end of the file.</summary>
     public bool HasTag { get; private set; }
 
     /// <summary>The group code of the current tag.</summary>
-    public int Code { get; private set; }
+    public int Code { get; protected set; }
 
-    /// <summary>The line of the current value, from 1.</summary>
-    public int Line => _lines;
+    /// <summary>Where the current value stands.</summary>
+    public abstract FilePlace Place { get; }
 
-    /// <summary>The current value without the blanks around it.</summary>
-    public ReadOnlySpan<byte> Value => _buffer.AsSpan(_valueStart, _valueLength);
+    /// <summary>Where the current group code stands.</summary>
+    public abstract FilePlace CodePlace { get; }
+
+    /// <summary>The current value as text; in a text file without the blanks around it.</summary>
+    public abstract ReadOnlySpan<byte> Value { get; }
 
     /// <summary>The last value of the file if it has no line break, so that it may be cut off; else null.</summary>
-    public string? UnterminatedValue { get; private set; }
+    public virtual string? UnterminatedValue => null;
 
     /// <summary>Moves to the next tag; comments are passed over.</summary>
     /// <returns>False at the end of the file.</returns>
@@ -65,131 +53,15 @@ internal sealed class TagReader
 
     public bool Is(int code, ReadOnlySpan<byte> value) => HasTag && Code == code && Value.SequenceEqual(value);
 
-    public bool TryNumber(out double number) =>
-        double.TryParse(Value, NumberStyles.Float, CultureInfo.InvariantCulture, out number) && double.IsFinite(number);
+    /// <summary>The current value as a finite number.</summary>
+    public abstract bool TryNumber(out double number);
 
-    public bool TryInteger(out int number)
-    {
-        var digits = Value.Length > 0 && Value[0] == '+' ? Value[1..] : Value;
-        return Utf8Parser.TryParse(digits, out number, out var used) && used == digits.Length;
-    }
+    /// <summary>The current value as a whole number.</summary>
+    public abstract bool TryInteger(out int number);
 
     /// <summary>True if anything but blanks follows the current tag.</summary>
-    public bool HasMoreText()
-    {
-        while (TryLine(out var start, out var length))
-        {
-            if (Trimmed(start, length).Length > 0)
-            {
-                return true;
-            }
-        }
+    public abstract bool HasMoreText();
 
-        return false;
-    }
-
-    private bool ReadTag()
-    {
-        if (!TryLine(out var start, out var length))
-        {
-            return false;
-        }
-
-        var digits = Trimmed(start, length);
-        if (!Utf8Parser.TryParse(digits, out int code, out var used) || used != digits.Length)
-        {
-            var line = _lines;
-            var text = ReadingFaults.Quoted(digits);
-            if (digits.Length == 0 && !HasMoreText())
-            {
-                return false;
-            }
-
-            throw _anyTag ? ReadingFaults.GroupCode(line, text) : ReadingFaults.NotDxf(line, text);
-        }
-
-        var codeLine = _lines;
-        if (!_lineIsTerminated || !TryLine(out _valueStart, out _valueLength))
-        {
-            throw ReadingFaults.CodeWithoutValue(codeLine, code);
-        }
-
-        Code = code;
-        _anyTag = true;
-        var value = Trimmed(_valueStart, _valueLength);
-        if (value.Length < _valueLength)
-        {
-            _valueStart += _buffer.AsSpan(_valueStart, _valueLength).IndexOf(value);
-            _valueLength = value.Length;
-        }
-
-        UnterminatedValue = _lineIsTerminated ? null : Encoding.Latin1.GetString(value);
-        return true;
-    }
-
-    private ReadOnlySpan<byte> Trimmed(int start, int length) =>
-        // The end-of-file mark of old systems (Ctrl-Z) counts as a blank.
-        _buffer.AsSpan(start, length).Trim(" \t\u001a\0"u8);
-
-    private bool TryLine(out int start, out int length)
-    {
-        if (_lineFeedMayFollow && (_next < _end || Fill()) && _buffer[_next] == '\n')
-        {
-            _next++;
-        }
-
-        _lineFeedMayFollow = false;
-        var seen = 0;
-        while (true)
-        {
-            var at = _buffer.AsSpan(_next + seen, _end - _next - seen).IndexOfAny((byte)'\n', (byte)'\r');
-            if (at >= 0)
-            {
-                start = _next;
-                length = seen + at;
-                _lineFeedMayFollow = _buffer[start + length] == '\r';
-                _lineIsTerminated = true;
-                _next = start + length + 1;
-                _lines++;
-                return true;
-            }
-
-            seen = _end - _next;
-            if (seen > LongestLine)
-            {
-                throw ReadingFaults.LongLine(_lines + 1);
-            }
-
-            if (!Fill())
-            {
-                start = _next;
-                length = seen;
-                _lineIsTerminated = false;
-                _next = _end;
-                _lines += seen > 0 ? 1 : 0;
-                return seen > 0;
-            }
-        }
-    }
-
-    /// <summary>Moves what is left to the front of the buffer and reads more behind it.</summary>
-    private bool Fill()
-    {
-        if (_streamIsRead)
-        {
-            return false;
-        }
-
-        var left = _end - _next;
-        if (left == _buffer.Length)
-        {
-            Array.Resize(ref _buffer, 2 * _buffer.Length);
-        }
-
-        _buffer.AsSpan(_next, left).CopyTo(_buffer);
-        _next = 0;
-        _end = left + _stream.ReadAtLeast(_buffer.AsSpan(left), _buffer.Length - left, throwOnEndOfStream: false);
-        _streamIsRead = _end < _buffer.Length;
-        return _end > left;
-    }
+    /// <summary>Reads a tag, comments too.</summary>
+    protected abstract bool ReadTag();
 }

@@ -61,9 +61,11 @@ public class ArcsAndBulgesTest
     [InlineData(0, 359.999, 359.999)]
     public void An_arc_runs_counter_clockwise_from_its_start_to_its_end(double from, double to, double sweep)
     {
-        var arc = new Dxf.Entities.ArcEntity(new("ARC", null, "0", 1), 0, new Point(1, 2), 5, from, to);
+        var arc = Read(Drawing([Arc(1, 2, 5, from, to)])).Entities[0];
+        var placed = new Dxf.Placing.PlacedEntity(arc, arc.Source, Dxf.Space.SpaceMap.Identity);
         var edges = new List<Edge>();
-        Dxf.Curves.EntityEdges.Append(arc, new Dxf.Curves.LocalFrame(default, default, 1), edges);
+        var curve = Assert.Single(Dxf.Curves.EntityCurves.Of(placed, Dxf.Curves.DrawingPlane.Own));
+        Dxf.Curves.CurveEdges.Append(curve, new Dxf.Curves.LocalFrame(default, default, 1), edges);
         Assert.Equal(sweep, edges.Sum(e => ((ArcEdge)e).Sweep) * 180 / Math.PI, 1e-9);
         Assert.Equal(sweep > 180 ? 2 : 1, edges.Count);
         Assert.All(edges, e => Assert.Equal(5, ((ArcEdge)e).Radius, 1e-12));

@@ -31,8 +31,8 @@ public class OpenAndBranchTest
     [Fact]
     public void An_open_boundary_names_what_was_not_read()
     {
-        var refusal = Refusal(Drawing([Line(0, 0, 10, 0), Line(10, 0, 10, 8), Tagged((0, "SPLINE"), (5, "1"), (8, "0"), (10, "0,0"))]));
-        Assert.Contains("1 SPLINE not read", refusal.Message, StringComparison.Ordinal);
+        var refusal = Refusal(Drawing([Line(0, 0, 10, 0), Line(10, 0, 10, 8), Tagged((0, "REGION"), (5, "1"), (8, "0"), (10, "0,0"))]));
+        Assert.Contains("1 REGION not read", refusal.Message, StringComparison.Ordinal);
     }
 
     [Fact]

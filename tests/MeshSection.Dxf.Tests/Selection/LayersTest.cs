@@ -11,7 +11,7 @@ public class LayersTest
             Square(0, 0, 10, layer: "Wall-Outer"), Circle(5, 5, 1, layer: "WALL-INNER"), Line(0, 0, 50, 50, layer: "Off"),
             Line(0, 0, 50, 50, layer: "Frozen"), Line(0, 0, 50, 50, layer: "defpoints"),
             Line(0, 0, 50, 50) + Tagged((67, 1)), Line(0, 0, 50, 50) + Tagged((60, 1)),
-            Tagged((0, "TEXT"), (8, "NOTES"), (10, "not a number"), (1, "PLAN")), Tagged((0, "INSERT"), (8, "NOTES"), (2, "BOLT")),
+            Tagged((0, "TEXT"), (8, "NOTES"), (10, "not a number"), (1, "PLAN")), Tagged((0, "INSERT"), (8, "NOTES"), (2, "BOLT"), (10, 0), (20, 0)),
         ],
         layers: Layer("Wall-Outer") + Layer("Wall-Inner") + Layer("Off", colour: -7) + Layer("Frozen", flags: 1) + Layer("Defpoints"));
 
@@ -22,13 +22,13 @@ public class LayersTest
 
         Assert.Equal(
             [
-                ("TEXT", LeftOutReason.Annotation), ("INSERT", LeftOutReason.KindNotRead), ("LINE", LeftOutReason.LayerOff),
+                ("TEXT", LeftOutReason.Annotation), ("LINE", LeftOutReason.LayerOff),
                 ("LINE", LeftOutReason.LayerFrozen), ("LINE", LeftOutReason.LayerNotPlotted), ("LINE", LeftOutReason.PaperSpace),
-                ("LINE", LeftOutReason.Invisible),
+                ("LINE", LeftOutReason.Invisible), ("INSERT", LeftOutReason.BlockMissing),
             ],
             report.LeftOut.Select(c => (c.Kind, c.Reason)));
         Assert.Equal(2, report.Used.Sum(c => c.Count));
-        Assert.Contains("explode the blocks", Assert.Single(report.Cautions).Message, StringComparison.Ordinal);
+        Assert.Contains("'BOLT'", Assert.Single(report.Cautions).Message, StringComparison.Ordinal);
     }
 
     [Theory]
@@ -66,10 +66,10 @@ public class LayersTest
     [Fact]
     public void A_drawing_of_what_is_not_read_says_what_and_what_to_do()
     {
-        var refusal = Refusal(Drawing([Tagged((0, "SPLINE"), (8, "A")), Tagged((0, "HATCH"), (8, "A")), Tagged((0, "REGION"), (8, "B")), Line(0, 0, 1, 1) + Tagged((67, 1))]));
+        var refusal = Refusal(Drawing([Tagged((0, "HELIX"), (8, "A")), Tagged((0, "MLINE"), (8, "A")), Tagged((0, "REGION"), (8, "B")), Line(0, 0, 1, 1) + Tagged((67, 1))]));
 
         Assert.Equal(DrawingFault.NoBoundary, refusal.Fault);
-        foreach (var part in new[] { "1 SPLINE on 'A' (not read)", "convert them to polylines", "REGION", "on a layout sheet" })
+        foreach (var part in new[] { "1 HELIX on 'A' (not read)", "convert them to polylines", "REGION", "on a layout sheet" })
         {
             Assert.Contains(part, refusal.Message, StringComparison.Ordinal);
         }

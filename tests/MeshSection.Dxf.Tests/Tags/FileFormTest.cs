@@ -93,7 +93,7 @@ public class FileFormTest
     public void Bytes_that_come_one_by_one_make_the_same_drawing()
     {
         using var stream = new OneByteStream(Encoding.ASCII.GetBytes(Plain));
-        Assert.Equal(2, new AsciiDxfReader().Read(stream).Entities.Length);
+        Assert.Equal(2, new DxfReader().Read(stream).Entities.Length);
     }
 
     private sealed class OneByteStream(byte[] bytes) : MemoryStream(bytes)

@@ -7,6 +7,7 @@ import fnmatch
 import json
 import math
 import os
+import re
 import sys
 
 sys.dont_write_bytecode = True
@@ -20,6 +21,8 @@ SAG = 2e-5
 def entities(space):
     for e in space:
         if e.dxftype() == "INSERT":
+            if e.block() is None:
+                continue
             for part in (e.multi_insert() if e.mcount > 1 else [e]):
                 # content on layer 0 takes the layer of the insert
                 for v in entities(part.virtual_entities()):
@@ -30,6 +33,10 @@ def entities(space):
             yield e
 
 
+def plain(layer):
+    return re.sub(r"\\U\+([0-9A-Fa-f]{4})", lambda m: chr(int(m[1], 16)), layer)
+
+
 def chains(doc, options):
     wanted = options.get("layers")
     plane = {"XZ": (0, 2), "YZ": (1, 2)}.get(options.get("plane"), (0, 1))
@@ -38,7 +45,7 @@ def chains(doc, options):
         if kind not in {"LINE", "ARC", "CIRCLE", "ELLIPSE", "SPLINE", "LWPOLYLINE", "POLYLINE", "HATCH", "SOLID", "TRACE"}:
             continue
         if wanted:
-            if not any(fnmatch.fnmatchcase(layer.lower(), w.lower()) for w in wanted):
+            if not any(fnmatch.fnmatchcase(plain(layer).lower(), w.lower()) for w in wanted):
                 continue
         elif layer in doc.layers:
             entry = doc.layers.get(layer)
@@ -65,6 +72,8 @@ def chains(doc, options):
 def loops(pieces, eps):
     out, rest = [], []
     for c in pieces:
+        if max(math.dist(c[0], p) for p in c) < eps:
+            continue  # Inkscape writes lines of no length
         (out if math.dist(c[0], c[-1]) < eps and len(c) > 2 else rest).append(c)
     while rest:
         c = rest.pop()
@@ -111,9 +120,9 @@ def main():
         name = e["file"] + (" " + json.dumps(e["options"], ensure_ascii=False) if e["options"] else "")
         try:
             doc = ezdxf.readfile(e["file"])
-            _, auditor = recover.readfile(e["file"])
-            for x in auditor.errors:
-                print(name, "recover:", x.message)
+            if "binary" not in e["file"]:  # recover is for text
+                for text in sorted({x.message.split(" in ")[0] for x in recover.readfile(e["file"])[1].errors}):
+                    print(name, "recover:", text)
         except Exception as x:
             print(name, "NOT READ:", x)
             bad += 1

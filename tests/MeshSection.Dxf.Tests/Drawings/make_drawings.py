@@ -484,6 +484,19 @@ def group_4():
     save(doc, "04-hatch-clockwise-arc.dxf")
     expect("04-hatch-clockwise-arc.dxf", [[S.line(u, v) for u, v in zip(corners, corners[1:])] + [S.arc_deg(c, r, b, a)]])
 
+    # a corner hollowed by a quarter of an ellipse, clockwise from 270 to 180: the ends tell what the angles mean
+    doc, msp = new()
+    hatch = msp.add_hatch(color=8)
+    path = hatch.paths.add_edge_path()
+    corners = [(70.0, 60.0), (0.0, 60.0), (0.0, 0.0), (100.0, 0.0), (100.0, 48.0)]
+    for u, v in zip(corners, corners[1:]):
+        path.add_line(u, v)
+    path.add_ellipse((100, 60), (30, 0), 0.4, 180, 270, ccw=False)
+    save(doc, "04-hatch-clockwise-ellipse.dxf")
+    loop = [S.line(u, v) for u, v in zip(corners, corners[1:])] + [S.ellipse((100, 60), (30, 0), LD("0.4"), PI * 3 / 2, PI)]
+    assert abs(S.integrals([loop])[0] - (6000 - math.pi * 30 * 12 / 4)) < 1e-10
+    expect("04-hatch-clockwise-ellipse.dxf", [loop])
+
     doc, msp = new()
     hatch = msp.add_hatch(color=8)
     hatch.paths.add_polyline_path(outer, is_closed=True, flags=1)

@@ -45,8 +45,14 @@ public enum DrawingFault
     /// <summary>The tolerance is no length, or as large as the shortest edge.</summary>
     ToleranceUnusable,
 
-    /// <summary>Three or more ends meet at one point.</summary>
-    Branch,
+    /// <summary>A gap can be closed in more than one way.</summary>
+    AmbiguousGap,
+
+    /// <summary>Lines divide the drawing into faces of which some may be holes.</summary>
+    Ambiguous,
+
+    /// <summary>A point that should lie in the section lies in no closed boundary.</summary>
+    NothingThere,
 
     /// <summary>A boundary does not close.</summary>
     OpenBoundary,

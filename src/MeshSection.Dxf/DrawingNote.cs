@@ -83,6 +83,24 @@ public enum NoteCode
 
     /// <summary>Edges that were there twice were dropped.</summary>
     DuplicateDropped = 403,
+
+    /// <summary>Pieces that lead nowhere were left out.</summary>
+    DanglingLeftOut = 404,
+
+    /// <summary>Lines were split where they meet.</summary>
+    LinesSplit = 405,
+
+    /// <summary>A boundary lies in a hole of another: a piece of the section by itself.</summary>
+    NestedOuter = 406,
+
+    /// <summary>Regions overlap; the order decided.</summary>
+    RegionsOverlap = 407,
+
+    /// <summary>A bar lies outside of the section.</summary>
+    BarOutside = 408,
+
+    /// <summary>Lines divide the section into faces that were taken as one.</summary>
+    FacesTogether = 409,
 }
 
 /// <summary>Something that a person should know about how a drawing was understood.</summary>
@@ -104,7 +122,7 @@ public sealed record DrawingNote(
     /// <summary>True for what was mended; false for what only calls for attention.</summary>
     public bool IsRepair => Code is NoteCode.NoEndOfFile or NoteCode.NoEndOfSection or NoteCode.BareEntities
         or NoteCode.PolylineMended or NoteCode.BlockMended or NoteCode.NoLength or NoteCode.Sliver or NoteCode.GapBridged
-        or NoteCode.PolylineClosed or NoteCode.DuplicateDropped;
+        or NoteCode.PolylineClosed or NoteCode.DuplicateDropped or NoteCode.DanglingLeftOut or NoteCode.LinesSplit;
 
     internal static DrawingNote About(NoteCode code, string message, params ReadOnlySpan<EntitySource> sources) =>
         new(code, message, [.. sources]);

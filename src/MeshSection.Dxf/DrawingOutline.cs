@@ -10,5 +10,13 @@ namespace MeshSection.Dxf;
 /// <param name="Sources">
 /// The entity that edge e of boundary b came from, at [b][e], for the boundaries and edges of <paramref name="Outline"/>.
 /// </param>
+/// <param name="Faces">
+/// The faces of the drawing that make the section, if points, layers of regions or fills chose them; empty if nesting did.
+/// </param>
+/// <param name="Bars">The bars on layers of bars.</param>
 public sealed record DrawingOutline(
-    Outline Outline, DrawingReport Report, ImmutableArray<ImmutableArray<EntitySource>> Sources);
+    Outline Outline,
+    DrawingReport Report,
+    ImmutableArray<ImmutableArray<EntitySource>> Sources,
+    ImmutableArray<DrawnFace> Faces,
+    ImmutableArray<DrawnBar> Bars);

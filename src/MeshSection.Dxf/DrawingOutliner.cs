@@ -1,6 +1,7 @@
 using System.Collections.Immutable;
 using MeshSection.Dxf.Curves;
 using MeshSection.Dxf.Entities;
+using MeshSection.Dxf.Faces;
 using MeshSection.Dxf.Loops;
 using MeshSection.Dxf.Placing;
 using MeshSection.Dxf.Selection;
@@ -49,8 +50,17 @@ public static class DrawingOutliner
         }
 
         var gap = JoinGap.Of(pieces, frame, options.Joining.MaxGap);
-        var loops = LoopFinder.Find(pieces, frame, gap, OutlineFaults.Unread(selection), notes, out var joins);
-        var outline = Sound(loops, frame);
+        var joined = new JoinNotes(frame);
+        var finder = new BoundaryFinder(frame, gap, OutlineFaults.Unread(selection), joined);
+        var (outline, loops, faces) = SectionLoops.Find(pieces, selection, options, frame, finder, notes);
+        foreach (var loop in loops.Where(l => l.Entities[0].IsOpenPolyline && l.Entities.All(e => e == l.Entities[0])))
+        {
+            joined.Closed(loop.Entities[0]);
+        }
+
+        notes.AddRange(joined.All());
+        NoteNesting(outline, frame, notes);
+        var bars = BarList.Of(selection, plane, frame, outline, notes);
         var report = new DrawingReport
         {
             Release = drawing.Release,
@@ -62,11 +72,11 @@ public static class DrawingOutliner
             Used = selection.UsedCounts,
             LeftOut = selection.LeftOut,
             Pieces = loops.Sum(l => l.Edges.Count),
-            Joins = joins,
+            Joins = Joins(loops),
             Repairs = Sorted(notes.Where(n => n.IsRepair)),
             Cautions = Sorted(notes.Where(n => !n.IsRepair)),
         };
-        return new DrawingOutline(outline, report, Sources(outline, loops));
+        return new DrawingOutline(outline, report, Sources(outline, loops), faces, bars);
     }
 
     private static LengthUnit Unit(Drawing drawing, OutlineOptions options, List<DrawnEntity> used, List<DrawingNote> notes)
@@ -132,17 +142,25 @@ public static class DrawingOutliner
         }
     }
 
-    private static Outline Sound(List<Loop> loops, LocalFrame frame)
+    private static void NoteNesting(Outline outline, LocalFrame frame, List<DrawingNote> notes)
     {
-        try
+        for (var b = 0; b < outline.Boundaries.Length; b++)
         {
-            return Geometry.Outline.Create(loops.Select(l => Boundary.Create(l.Edges)), frame.Scale * frame.Origin);
-        }
-        catch (OutlineException unsound)
-        {
-            throw OutlineFaults.Unsound(unsound, loops, frame);
+            if (outline.Boundaries[b] is { Role: BoundaryRole.Island, Boundary: var island })
+            {
+                var at = frame.ToDrawing(island.Edges[0].Start);
+                notes.Add(new DrawingNote(
+                    NoteCode.NestedOuter,
+                    $"The boundary at {Wording.At(at)} lies in a hole: it was taken as a piece of the section by itself. If it is none, " +
+                    "leave it out with --layer, or choose with --inside.",
+                    [], at));
+            }
         }
     }
+
+    /// <summary>The number of places at which edges of different entities follow each other.</summary>
+    private static int Joins(List<Loop> loops) => loops.Sum(
+        l => Enumerable.Range(0, l.Entities.Count).Count(i => l.Entities[i] != l.Entities[(i + 1) % l.Entities.Count]));
 
     private static ImmutableArray<DrawingNote> Sorted(IEnumerable<DrawingNote> notes) => [.. notes.OrderBy(n => n.Code)];
 

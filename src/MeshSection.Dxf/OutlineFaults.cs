@@ -87,34 +87,9 @@ internal static class OutlineFaults
         $"{Wording.Distance(gap.Length / frame.Scale)}. Give a smaller --tolerance, or leave out what is no part of the outline with --layer.")
     { Tolerance = gap.Length / frame.Scale };
 
-    public static DrawingException Branch(
-        List<Piece> met, Point place, bool isBridged, int branches, LocalFrame frame, JoinGap gap)
+    public static DrawingException Open(List<FreeEnd> freeEnds, LocalFrame frame, JoinGap gap, string unread)
     {
-        var at = frame.ToDrawing(place);
-        var places = met.Select(p => new EntityPlace(p.Entity.Source, at)).ToImmutableArray();
-        var names = Wording.Names(met.Select(p => p.Entity.Source));
-        var others = branches > 1 ? $" There are {branches} such points." : "";
-        if (met.TrueForAll(p => p.Entity.IsClosed) && met.Select(p => p.Entity).Distinct().Count() > 1)
-        {
-            return new DrawingException(
-                DrawingFault.TouchingBoundaries,
-                $"Boundaries touch at {Wording.At(at)}: {names}.{others} Draw what is one piece as one boundary, or move them apart.")
-            { Places = places };
-        }
-
-        var gapHint = isBridged
-            ? $" Some of them lie up to {Wording.Distance(gap.Length / frame.Scale)} apart and were joined; a smaller --tolerance keeps them apart."
-            : "";
-        return new DrawingException(
-            DrawingFault.Branch,
-            $"{met.Count} ends meet at {Wording.At(at)}, where a boundary has two: {names}.{others}{gapHint} If one of them is " +
-            "no part of the outline (a centre line, say), delete it or leave out its layer with --layer.")
-        { Places = places };
-    }
-
-    public static DrawingException Open(List<(Piece Piece, Point Place)> freeEnds, LocalFrame frame, JoinGap gap, string unread)
-    {
-        var places = freeEnds.Select(e => new EntityPlace(e.Piece.Entity.Source, frame.ToDrawing(e.Place))).ToImmutableArray();
+        var places = freeEnds.Select(e => new EntityPlace(e.Source, frame.ToDrawing(e.Place))).ToImmutableArray();
         var distance = freeEnds[0].Place.DistanceTo(freeEnds[1].Place) / frame.Scale;
         var joining = RoundedUp(distance);
         double? tolerance = joining * frame.Scale < gap.Shortest ? joining : null;
@@ -125,12 +100,43 @@ internal static class OutlineFaults
             : "Draw what is missing between them.";
         return new DrawingException(
             DrawingFault.OpenBoundary,
-            $"A boundary is open: {a.Source} ends freely at {Wording.At(a.Point!.Value)}; the nearest free end, of {b.Source} at " +
-            $"{Wording.At(b.Point!.Value)}, is {Wording.Distance(distance)} away, and ends are joined up to " +
+            $"A boundary is open: {a.Source} ends freely at {Wording.At(a.Point!.Value)}; the nearest that it could be joined to, " +
+            $"{b.Source} at {Wording.At(b.Point!.Value)}, is {Wording.Distance(distance)} away, and ends are joined up to " +
             $"{Wording.Distance(gap.Length / frame.Scale)}.{more} {remedy} If they are no part of the outline, delete them or " +
             $"choose the layers of the outline with --layer.{unread}")
         { Places = places, Distance = distance, Tolerance = tolerance };
     }
+
+    public static DrawingException AmbiguousGap(
+        List<EntitySource> met, Point place, double spread, LocalFrame frame, JoinGap gap)
+    {
+        var at = frame.ToDrawing(place);
+        return new DrawingException(
+            DrawingFault.AmbiguousGap,
+            $"{met.Count} ends lie within the tolerance of each other at {Wording.At(at)}, up to {Wording.Distance(spread / frame.Scale)} " +
+            $"apart, and can be joined in more than one way: {Wording.Names(met)}. Join those that belong together in the drawing, " +
+            $"or keep them apart with a smaller --tolerance than {Wording.Distance(gap.Length / frame.Scale)}. If one of them is no " +
+            "part of the outline, delete it or leave out its layer with --layer.")
+        { Places = [.. met.Select(m => new EntityPlace(m, at))], Distance = spread / frame.Scale };
+    }
+
+    public static DrawingException Ambiguous(List<MapFaceWords> faces, IEnumerable<EntityPlace> meetings) => new(
+        DrawingFault.Ambiguous,
+        $"The lines divide the drawing into {faces.Count} faces, and which of them are material cannot be told: " +
+        string.Join("; ", faces.Take(8).Select(f => f.Text)) + (faces.Count > 8 ? $"; and {faces.Count - 8} more" : "") +
+        ". Lines meet " + string.Join(", ", meetings.Take(3).Select(m => $"at {Wording.At(m.Point!.Value)} ({m.Source.Name})")) +
+        ". Give --inside X,Y once for each face of the section, or leave lines that only divide it out with --layer or --ignore.")
+    { Places = [.. meetings] };
+
+    public static DrawingException NothingOnRegions(IReadOnlyList<string> regions) => new(
+        DrawingFault.NoBoundary,
+        $"Nothing that an outline can be made of lies on the layers of regions: {string.Join(", ", regions.Select(r => $"'{r}'"))}. " +
+        "Name the layers on which the closed boundaries of the regions are drawn.");
+
+    public static DrawingException NothingThere(Point place) => new(
+        DrawingFault.NothingThere,
+        $"--inside {Wording.Coordinate(place.X)},{Wording.Coordinate(place.Y)}: there is no closed boundary around this point. " +
+        "Give a point in the drawing's own axes and unit that lies within the section.");
 
     public static DrawingException Unsound(OutlineException unsound, List<Loop> loops, LocalFrame frame)
     {
@@ -151,8 +157,8 @@ internal static class OutlineFaults
             OutlineFault.NoArea => (DrawingFault.NoArea, "A boundary encloses no area", "Delete it, or draw it with its true width."),
             OutlineFault.SelfCrossing => (DrawingFault.SelfCrossing, "A boundary crosses itself", "Trim the edges where they cross."),
             OutlineFault.SelfTouching => (DrawingFault.SelfTouching, "A boundary touches itself", "Move the edges apart, or draw two boundaries."),
-            OutlineFault.Crossing => (DrawingFault.CrossingBoundaries, "Two boundaries cross", "Trim them where they cross, or leave one out with --layer."),
-            OutlineFault.Touching => (DrawingFault.TouchingBoundaries, "Two boundaries touch", "Draw what is one piece as one boundary, or move them apart."),
+            OutlineFault.Crossing => (DrawingFault.CrossingBoundaries, "Two boundaries cross", "Trim them where they cross, leave one out with --layer, or say with --inside X,Y, once for each, which parts are the section."),
+            OutlineFault.Touching => (DrawingFault.TouchingBoundaries, "Two boundaries touch", "Draw what is one piece as one boundary, or say with --inside X,Y, once for each, which parts are the section."),
             OutlineFault.Duplicate => (DrawingFault.DuplicateBoundary, "The same boundary is there twice", "Delete one of the two."),
             _ => throw new InvalidOperationException($"No message for {unsound.Fault}.", unsound),
         };

@@ -1,3 +1,4 @@
+using MeshSection.Dxf.Entities;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf.Curves;
@@ -16,6 +17,15 @@ internal static class PieceList
             foreach (var curve in drawn.Curves)
             {
                 dropped += CurveEdges.Append(curve, frame, edges);
+            }
+
+            if (drawn.Placed.Entity is SplineEntity { Spline.Controls.IsEmpty: true })
+            {
+                notes.Add(DrawingNote.About(
+                    NoteCode.SplineInterpolated,
+                    $"{drawn.Placed.Source} states only points that it runs through: it was taken as the cubic of continuous curvature " +
+                    "through them, with chord lengths as parameter, which another program may draw a little otherwise.",
+                    drawn.Placed.Source));
             }
 
             foreach (var edge in edges)

@@ -19,4 +19,8 @@ public readonly record struct DrawingColour(int Index, int? Rgb = null)
 
     /// <summary>True if it stands for the colour of the block's insertion.</summary>
     public bool IsByBlock => Rgb is null && Index == OfBlock;
+
+    /// <summary>True if it is the colour asked for: by true colour if that is what is asked for, else by number.</summary>
+    /// <param name="asked">A number, or a true colour.</param>
+    public bool Matches(DrawingColour asked) => asked.Rgb is { } rgb ? Rgb == rgb : Index == asked.Index;
 }

@@ -30,6 +30,7 @@ internal sealed class EntityReader(TagReader tags, TagText text, List<DrawingNot
             "ELLIPSE" => Ellipse(),
             "SPLINE" => new SplineEntity(_fields.Source, SplineReader.Read(_fields)),
             "SOLID" or "TRACE" => Quadrilateral(),
+            "3DFACE" => Face(),
             "HATCH" => new HatchReader(_fields).Read(),
             "POINT" => new PointEntity(_fields.Source, _fields.SpacePoint(10, "place")),
             "INSERT" => Insert(),
@@ -50,6 +51,7 @@ internal sealed class EntityReader(TagReader tags, TagText text, List<DrawingNot
         : value.SequenceEqual("HATCH"u8) ? "HATCH"
         : value.SequenceEqual("SOLID"u8) ? "SOLID"
         : value.SequenceEqual("TRACE"u8) ? "TRACE"
+        : value.SequenceEqual("3DFACE"u8) ? "3DFACE"
         : value.SequenceEqual("POINT"u8) ? "POINT"
         : null;
 
@@ -156,6 +158,17 @@ internal sealed class EntityReader(TagReader tags, TagText text, List<DrawingNot
         ImmutableArray<PolylineVertex> distinct = [.. corners.Where((c, i) => c != corners[(i + 1) % corners.Count])];
         return new FillEntity(
             source, [new PolylineEntity(source, _fields.Normal, _fields.Number(30) ?? 0, distinct, IsClosed: true)]);
+    }
+
+    private FillEntity Face()
+    {
+        var source = _fields.Source;
+        var corners = Enumerable.Range(10, 4)
+            .Where(code => code < 13 || _fields.Number(13) is not null)
+            .Select(code => _fields.SpacePoint(code, "corner"))
+            .ToList();
+        ImmutableArray<SpacePoint> distinct = [.. corners.Where((c, i) => c != corners[(i + 1) % corners.Count])];
+        return new FillEntity(source, [new SpatialPolylineEntity(source, distinct, IsClosed: true)]);
     }
 
     private InsertEntity Insert()

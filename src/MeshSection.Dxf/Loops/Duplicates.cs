@@ -1,61 +1,52 @@
-using MeshSection.Dxf.Curves;
-using MeshSection.Dxf.Placing;
+using MeshSection.Geometry;
 
 namespace MeshSection.Dxf.Loops;
 
-/// <summary>Drops pieces that run between the same nodes along the same curve as another.</summary>
+/// <summary>Finds curves that run between the same nodes along the same way as another.</summary>
 internal static class Duplicates
 {
-    /// <param name="pieces">All pieces.</param>
-    /// <param name="dropped">Which pieces take no part; those dropped here are added.</param>
-    /// <param name="nodes">Where the pieces meet.</param>
+    /// <summary>Each duplicate and the one that stays for it.</summary>
+    /// <param name="curves">The curves, each with its nodes and a number.</param>
+    /// <param name="places">The places of the nodes, by which the direction is chosen in which they are compared.</param>
     /// <param name="tolerance">How far apart two curves between the same nodes may be and still be one, mm.</param>
-    /// <param name="found">How many edges of one entity were dropped for those of another; added to.</param>
-    public static void Drop(
-        List<Piece> pieces,
-        bool[] dropped,
-        EndNodes nodes,
-        double tolerance,
-        Dictionary<(PlacedEntity Dropped, PlacedEntity Kept), int> found)
+    public static List<(int Dropped, int Kept)> Find(
+        IEnumerable<(int From, int To, Edge Edge, int Number)> curves, IReadOnlyList<Point> places, double tolerance)
     {
-        var candidates = new List<Candidate>(pieces.Count);
-        for (var i = 0; i < pieces.Count; i++)
+        var candidates = new List<Candidate>();
+        foreach (var (from, to, edge, number) in curves)
         {
-            if (!dropped[i])
-            {
-                var (a, b) = (nodes.Start(i), nodes.End(i));
-                var isForward = nodes.IsBefore(a, b);
-                candidates.Add(new Candidate(isForward ? a : b, isForward ? b : a, Rise(pieces[i], isForward), i));
-            }
+            var isForward = (places[from].X, places[from].Y).CompareTo((places[to].X, places[to].Y)) < 0;
+            candidates.Add(new Candidate(isForward ? from : to, isForward ? to : from, Rise(edge, isForward), number));
         }
 
         candidates.Sort();
+        var found = new List<(int Dropped, int Kept)>();
         for (var k = 1; k < candidates.Count; k++)
         {
             var (kept, next) = (candidates[k - 1], candidates[k]);
             if (next.From == kept.From && next.To == kept.To && next.Rise - kept.Rise <= tolerance)
             {
-                dropped[next.Piece] = true;
-                var pair = (pieces[next.Piece].Entity, pieces[kept.Piece].Entity);
-                found[pair] = found.GetValueOrDefault(pair) + 1;
+                found.Add((next.Number, kept.Number));
                 candidates[k] = kept;
             }
         }
+
+        return found;
     }
 
-    /// <summary>How far the piece rises over its chord, to the right of the way from the first of its nodes to the other.</summary>
-    private static double Rise(Piece piece, bool isForward)
+    /// <summary>How far the curve rises over its chord, to the right of the way from the first of its nodes to the other.</summary>
+    private static double Rise(Edge edge, bool isForward)
     {
-        var sag = piece.Edge.Sag;
-        return sag > 0 && piece.Edge.CapArea > 0 != isForward ? -sag : sag;
+        var sag = edge.Sag;
+        return sag > 0 && edge.CapArea > 0 != isForward ? -sag : sag;
     }
 
-    private readonly record struct Candidate(int From, int To, double Rise, int Piece) : IComparable<Candidate>
+    private readonly record struct Candidate(int From, int To, double Rise, int Number) : IComparable<Candidate>
     {
         public int CompareTo(Candidate other) =>
             From != other.From ? From.CompareTo(other.From)
             : To != other.To ? To.CompareTo(other.To)
             : Rise != other.Rise ? Rise.CompareTo(other.Rise)
-            : Piece.CompareTo(other.Piece);
+            : Number.CompareTo(other.Number);
     }
 }

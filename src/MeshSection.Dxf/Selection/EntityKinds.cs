@@ -9,7 +9,7 @@ internal static class EntityKinds
         "HELIX" => "convert them to polylines with arcs",
         "MLINE" => "explode them to lines",
         "MPOLYGON" => "draw their boundaries as closed polylines",
-        "REGION" or "3DFACE" or "3DSOLID" or "BODY" or "SURFACE" or "EXTRUDEDSURFACE" or "LOFTEDSURFACE" or
+        "REGION" or "3DSOLID" or "BODY" or "SURFACE" or "EXTRUDEDSURFACE" or "LOFTEDSURFACE" or
             "REVOLVEDSURFACE" or "SWEPTSURFACE" or "PLANESURFACE" or "NURBSURFACE" or "MESH" or "POLYLINE (mesh)" =>
             "explode them to lines and arcs",
         "ACAD_PROXY_ENTITY" or "ACAD_PROXY_OBJECT" => "explode them in the program that made them",

@@ -64,7 +64,7 @@ internal sealed class EntitySelection
             : source.IsInvisible ? LeftOutReason.Invisible
             : rules.Of(source) is not LeftOutReason.None and var hidden ? hidden
             : placed.Entity is UnreadEntity ? ReasonOfUnread(source.Kind)
-            : !isBar && options.Colours.Count > 0 && !options.Colours.Contains(rules.Colour(source)) ? LeftOutReason.ColourNotAsked
+            : !isBar && options.Colours.Count > 0 && !options.Colours.Any(rules.Colour(source).Matches) ? LeftOutReason.ColourNotAsked
             : isBar ? (placed.Entity is CircleEntity or PointEntity ? LeftOutReason.None : LeftOutReason.NoBar)
             : placed.Entity is PointEntity ? LeftOutReason.Annotation
             : LeftOutReason.None;

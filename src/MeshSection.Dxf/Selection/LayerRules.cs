@@ -14,9 +14,8 @@ internal sealed class LayerRules
     {
         _layers = drawing.Layers.GroupBy(l => l.Name, StringComparer.OrdinalIgnoreCase)
             .ToDictionary(g => g.Key, g => g.First(), StringComparer.OrdinalIgnoreCase);
-        var asked = Patterns(drawing, options.Layers);
+        var asked = Patterns(drawing, options.Layers.Count > 0 ? options.Layers : options.Regions);
         var ignored = Patterns(drawing, options.Ignored);
-        Patterns(drawing, options.Regions);
         var bars = options.Bars.Zip(Patterns(drawing, [.. options.Bars.Select(b => b.Layers)])).ToArray();
         foreach (var layer in _layers.Values)
         {

@@ -103,9 +103,9 @@ public class GapTest
         string[] pieces = [Line(0, 0, 10, 0, "1"), Line(10, 0.004, 10, 10, "2"), Line(10, 10, 0, 0, "3"), Line(10.004, 0, 20, 0, "4")];
         var refusal = Refusal(Drawing(pieces), Within(0.01));
 
-        Assert.Equal(DrawingFault.Branch, refusal.Fault);
+        Assert.Equal(DrawingFault.AmbiguousGap, refusal.Fault);
         Assert.Equal(["1", "2", "4"], refusal.Places.Select(p => p.Source.Handle!).Order());
-        Assert.Contains("smaller --tolerance", refusal.Message, StringComparison.Ordinal);
+        Assert.Contains("smaller --tolerance than 0.01", refusal.Message, StringComparison.Ordinal);
     }
 
     [Fact]

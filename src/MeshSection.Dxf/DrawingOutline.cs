@@ -14,9 +14,11 @@ namespace MeshSection.Dxf;
 /// The faces of the drawing that make the section, if points, layers of regions or fills chose them; empty if nesting did.
 /// </param>
 /// <param name="Bars">The bars on layers of bars.</param>
+/// <param name="LeftOut">The lines and curves that took no part although a person sees them in the drawing.</param>
 public sealed record DrawingOutline(
     Outline Outline,
     DrawingReport Report,
     ImmutableArray<ImmutableArray<EntitySource>> Sources,
     ImmutableArray<DrawnFace> Faces,
-    ImmutableArray<DrawnBar> Bars);
+    ImmutableArray<DrawnBar> Bars,
+    ImmutableArray<LeftOutEdge> LeftOut);

@@ -76,7 +76,8 @@ public static class DrawingOutliner
             Repairs = Sorted(notes.Where(n => n.IsRepair)),
             Cautions = Sorted(notes.Where(n => !n.IsRepair)),
         };
-        return new DrawingOutline(outline, report, Sources(outline, loops), faces, bars);
+        return new DrawingOutline(
+            outline, report, Sources(outline, loops), faces, bars, LeftOutEdges.Of(selection, plane, frame, joined));
     }
 
     private static LengthUnit Unit(Drawing drawing, OutlineOptions options, List<DrawnEntity> used, List<DrawingNote> notes)

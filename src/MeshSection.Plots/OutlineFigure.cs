@@ -19,33 +19,45 @@ public static class OutlineFigure
     /// <param name="outline">The outline; boundary i carries the number i + 1.</param>
     /// <param name="title">The heading; may be empty.</param>
     /// <param name="unit">The unit for every number on the picture.</param>
-    /// <param name="marks">
-    /// Places to point out; may be empty. Those farther from the outline than half its size are left out, lest it shrink.
+    /// <param name="findings">
+    /// What to show beside the boundaries. What lies farther from the outline than half its size is left out, lest it shrink.
     /// </param>
     /// <param name="size">Pixels; <see cref="PictureSize.Standard"/> if null.</param>
     /// <exception cref="ArgumentOutOfRangeException">The size is out of its range.</exception>
     public static Figure Of(
-        Outline outline, string title, LengthUnit unit, IReadOnlyList<OutlineMark> marks, PictureSize? size = null)
+        Outline outline, string title, LengthUnit unit, OutlineFindings findings, PictureSize? size = null)
     {
         ArgumentNullException.ThrowIfNull(outline);
         ArgumentNullException.ThrowIfNull(title);
         ArgumentNullException.ThrowIfNull(unit);
-        ArgumentNullException.ThrowIfNull(marks);
+        ArgumentNullException.ThrowIfNull(findings);
         var reach = outline.Bounds.Grown(0.5 * outline.Bounds.Diagonal);
-        OutlineMark[] near = [.. marks.Where(m => reach.Contains(m.Place - outline.Origin))];
+        OutlineMark[] near = [.. findings.Marks.Where(m => reach.Contains(m.Place - outline.Origin))];
+        OutlinePiece[] pieces = [.. findings.Pieces.Where(p => p.Edge.Bounds is var box && Holds(reach, box))];
         var bounds = near.Aggregate(outline.Bounds, (box, m) => box.With(m.Place - outline.Origin));
+        bounds = pieces.Aggregate(bounds, (box, p) => box.With(p.Edge.Bounds));
 
         var sheet = new Sheet(size ?? PictureSize.Standard);
         Heading.Add(sheet, title);
-        new Panel(Rows(outline, near)).Add(sheet, area => View.ScaleFor(bounds, Inner(area)));
+        new Panel(Rows(outline, near, pieces, findings)).Add(sheet, area => View.ScaleFor(bounds, Inner(area)));
         var view = View.Fit(bounds, Inner(sheet.Free));
         var lengths = new LengthScale(unit, Math.Max(outline.Bounds.Width, outline.Bounds.Height));
         ScaleBar.Add(sheet, view.Scale, unit, lengths.NoteOn(outline.Bounds));
 
         OutlineMarks.AddRegions(sheet, outline, view);
+        foreach (var piece in pieces)
+        {
+            sheet.Add(new Polyline(view.Of(piece.Edge), StrokeOf(piece.Role)));
+        }
+
         foreach (var boundary in outline.Boundaries)
         {
             BoundaryMarks.AddEdges(sheet, boundary, view);
+        }
+
+        foreach (var bar in findings.Bars)
+        {
+            sheet.Add(Bar(view.Of(bar.Place), 0.5 * view.Scale * (bar.Diameter ?? 0)));
         }
 
         AddMarks(sheet, outline, near, view);
@@ -60,16 +72,15 @@ public static class OutlineFigure
 
     private static Box Inner(Box area) => ScaleBar.Above(area).Grown(-50);
 
-    private static ImmutableArray<PanelRow> Rows(Outline outline, OutlineMark[] marks)
+    private static ImmutableArray<PanelRow> Rows(
+        Outline outline, OutlineMark[] marks, OutlinePiece[] pieces, OutlineFindings findings)
     {
         var rows = ImmutableArray.CreateBuilder<PanelRow>();
         var count = outline.Boundaries.Length;
         for (var i = 0; i < Math.Min(count, MostListed); i++)
         {
             var (boundary, role, _, _) = outline.Boundaries[i];
-            var lines = boundary.Edges.Count(e => e is LineEdge);
-            var arcs = boundary.Edges.Length - lines;
-            rows.Add(new ValueRow(Numbers.Count(i + 1), "", Words(role), $"{Counted(lines, "line")}, {Counted(arcs, "arc")}"));
+            rows.Add(new ValueRow(Numbers.Count(i + 1), "", Words(role), Edges(boundary)));
         }
 
         if (count > MostListed)
@@ -84,11 +95,27 @@ public static class OutlineFigure
 
         if (outline.Boundaries.Any(b => b.Boundary.Edges.Any(e => e is not LineEdge)))
         {
-            rows.Add(LegendRow.OfLine(BoundaryMarks.ArcBand, "arc"));
+            var hasCurves = outline.Boundaries.Any(b => b.Boundary.Edges.Any(e => e is BezierEdge));
+            rows.Add(LegendRow.OfLine(BoundaryMarks.ArcBand, hasCurves ? "arc or curve" : "arc"));
         }
 
         rows.Add(new LegendRow(p => [BoundaryMarks.Joint(p, 1)], "joint of two edges"));
         rows.Add(new LegendRow(p => [BoundaryMarks.Arrow(p, new Point(1, 0), Palette.Ink, 1)], "start, material on the left"));
+        foreach (var role in pieces.Select(p => p.Role).Distinct().Order())
+        {
+            rows.Add(LegendRow.OfLine(StrokeOf(role), role == PieceRole.LeadsNowhere ? "bounds nothing, left out" : "not chosen, left out"));
+        }
+
+        if (findings.Pieces.Length > pieces.Length)
+        {
+            rows.Add(new ValueRow("…", "", $"{Numbers.Count(findings.Pieces.Length - pieces.Length)} left out farther away", ""));
+        }
+
+        if (findings.Bars.Length > 0)
+        {
+            rows.Add(new LegendRow(p => [Bar(p, 6)], $"{Counted(findings.Bars.Length, "bar")}"));
+        }
+
         if (marks.Length > 0)
         {
             rows.Add(new LegendRow(p => [new Disc(p, 13, OxyColors.Undefined, Pointed)], "repaired or left out"));
@@ -117,6 +144,24 @@ public static class OutlineFigure
                 }
             }
         }
+    }
+
+    private static bool Holds(Box outer, Box inner) =>
+        outer.Contains(new Point(inner.MinX, inner.MinY)) && outer.Contains(new Point(inner.MaxX, inner.MaxY));
+
+    private static Stroke StrokeOf(PieceRole role) => role == PieceRole.LeadsNowhere
+        ? new Stroke(Palette.Orange, 2.2, 3, 5)
+        : new Stroke(Palette.Quiet, 1.4, 8, 6);
+
+    /// <summary>A bar to scale, but never too small to be seen.</summary>
+    private static Disc Bar(ScreenPoint place, double radius) => new(place, Math.Max(3, radius), Palette.Blue, new Stroke(Palette.Paper, 1));
+
+    private static string Edges(Boundary boundary)
+    {
+        var lines = boundary.Edges.Count(e => e is LineEdge);
+        var arcs = boundary.Edges.Count(e => e is ArcEdge);
+        var curves = boundary.Edges.Length - lines - arcs;
+        return $"{Counted(lines, "line")}, {Counted(arcs, "arc")}" + (curves > 0 ? $", {Counted(curves, "curve")}" : "");
     }
 
     private static string Words(BoundaryRole role) => role switch

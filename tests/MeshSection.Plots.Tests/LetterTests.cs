@@ -23,7 +23,7 @@ public class LetterTests
         IEnumerable<Figure> figures =
         [
             .. Hostile.All.Select(h => h.Sample.Figure()),
-            OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, []),
+            OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, OutlineFindings.None),
             MeshFigure.Of(Sample.Angle().Section, Sample.Angle().Mesh, Sample.Angle().Report, LengthUnit.Millimetre),
         ];
         var letters = figures.SelectMany(f => f.Marks.OfType<Label>()).SelectMany(l => l.Text).Distinct().ToArray();

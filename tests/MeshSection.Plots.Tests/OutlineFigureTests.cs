@@ -78,7 +78,7 @@ public class OutlineFigureTests
     }
 
     private static Figure Of(Outline outline, params OutlineMark[] marks) =>
-        OutlineFigure.Of(outline, "Title", LengthUnit.Millimetre, marks);
+        OutlineFigure.Of(outline, "Title", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], []));
 
     private static HashSet<string> Texts(Figure figure) => [.. figure.Marks.OfType<Label>().Select(l => l.Text)];
 

@@ -25,12 +25,12 @@ internal static class OutlineCommand
         var input = SectionInput.Read(request);
         foreach (var picture in output.Pictures)
         {
-            Picture.Save(OutlineFigure.Of(input.Section.Outline, input.Section.Title, input.Unit, DrawingMarks.Of(input)), picture, terminal, output);
+            Picture.Save(OutlineFigure.Of(input.Section.Outline, input.Section.Title, input.Unit, DrawingFindings.Of(input)), picture, terminal, output);
         }
 
         if (output.IsJson)
         {
-            terminal.WriteJson(stream => OutlineJson.Write(stream, input.Section.Outline, input.Drawing?.Report, input.Unit));
+            terminal.WriteJson(stream => OutlineJson.Write(stream, input.Section.Outline, input.Drawing, input.Unit));
         }
         else if (!output.IsQuiet)
         {

@@ -40,7 +40,7 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
 
     private static SectionInput OfDrawing(InputRequest request)
     {
-        var drawing = Outline(request.Path, request.Unit, request.Layers, request.Tolerance);
+        var drawing = Outline(request.Path, request.Drawing);
         var material = request.Density is { } density ? new Material("material", density) : null;
         var title = Path.GetFileNameWithoutExtension(request.Path);
         return new SectionInput(new Section(drawing.Outline, material, title), drawing.Report.Unit, drawing);
@@ -58,34 +58,31 @@ internal sealed record SectionInput(Section Section, LengthUnit Unit, DrawingOut
         }
 
         var tolerance = reference.Tolerance is { } gap ? new GivenLength(gap, LengthUnit.Millimetre) : (GivenLength?)null;
-        var drawing = Outline(reference.Path, reference.Unit, reference.Layers, tolerance);
+        var drawing = Outline(reference.Path, new DrawingRequest
+        {
+            Unit = reference.Unit,
+            Layers = reference.Layers,
+            Tolerance = tolerance,
+        });
         return new SectionInput(new Section(drawing.Outline, material, file.Title), file.Unit ?? drawing.Report.Unit, drawing);
     }
 
     private static void RefuseDrawingOptions(InputRequest request, SectionFile file)
     {
-        var given = request.Unit is not null ? "--unit" : request.Layers.Count > 0 ? "--layer" : request.Tolerance is not null ? "--tolerance" : null;
-        if (given is not null)
+        if (request.Drawing.FirstOption is { } given)
         {
             throw new CommandException(
                 $"{given} is for drawings, and {request.Path} is a section file: say it there, under \"{(file.Drawing is null ? "units" : "outline")}\".");
         }
     }
 
-    private static DrawingOutline Outline(
-        string path, LengthUnit? unit, IReadOnlyList<string> layers, GivenLength? tolerance)
+    private static DrawingOutline Outline(string path, DrawingRequest request)
     {
         using var stream = InputFiles.Open(path);
         try
         {
             var drawing = new DxfReader().Read(stream);
-            var own = unit ?? drawing.Unit;
-            return DrawingOutliner.Outline(drawing, new OutlineOptions
-            {
-                Unit = unit,
-                Layers = layers,
-                Joining = new Joining { MaxGap = own is null ? tolerance?.Value : tolerance?.In(own, own) },
-            });
+            return DrawingOutliner.Outline(drawing, request.Options(drawing.Unit));
         }
         catch (DrawingException fault)
         {

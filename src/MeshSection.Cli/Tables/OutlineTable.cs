@@ -20,8 +20,10 @@ internal static class OutlineTable
         }
 
         console.Write(Boundaries(input, lengths));
-        if (input.Drawing is { Report: var report })
+        if (input.Drawing is { Report: var report } found)
         {
+            Faces(console, found);
+            Bars(console, found, lengths);
             Entities(console, "Used", report.Used, isReasoned: false);
             Entities(console, "Left out", report.LeftOut, isReasoned: true);
             Notes(console, "Repaired", report.Repairs);
@@ -44,24 +46,75 @@ internal static class OutlineTable
 
     private static Table Boundaries(SectionInput input, Lengths lengths)
     {
-        var table = TableStyle.Columns(
-            "Boundary", "role", "in", "lines", "arcs", "length " + lengths.Symbol(), "area inside " + lengths.Symbol(2));
         var boundaries = input.Section.Outline.Boundaries;
+        var hasCurves = boundaries.Any(b => b.Boundary.Edges.Any(e => e is BezierEdge));
+        string[] kinds = hasCurves ? ["lines", "arcs", "curves"] : ["lines", "arcs"];
+        var table = TableStyle.Columns(
+            "Boundary", ["role", "in", .. kinds, "length " + lengths.Symbol(), "area inside " + lengths.Symbol(2)]);
         for (var i = 0; i < boundaries.Length; i++)
         {
             var (boundary, role, parent) = (boundaries[i].Boundary, boundaries[i].Role, boundaries[i].Parent);
-            var arcs = boundary.Edges.Count(e => e is ArcEdge);
-            table.AddRow(
+            List<string> cells =
+            [
                 TableStyle.Number(i + 1),
                 role.ToString().ToLowerInvariant(),
                 parent < 0 ? "" : TableStyle.Number(parent + 1),
-                TableStyle.Number(boundary.Edges.Length - arcs),
-                TableStyle.Number(arcs),
-                lengths.Of(boundary.Length),
-                lengths.Of(Math.Abs(boundary.SignedArea), 2));
+                TableStyle.Number(boundary.Edges.Count(e => e is LineEdge)),
+                TableStyle.Number(boundary.Edges.Count(e => e is ArcEdge)),
+            ];
+            if (hasCurves)
+            {
+                cells.Add(TableStyle.Number(boundary.Edges.Count(e => e is BezierEdge)));
+            }
+
+            table.AddRow([.. cells, lengths.Of(boundary.Length), lengths.Of(Math.Abs(boundary.SignedArea), 2)]);
         }
 
         return table;
+    }
+
+    private static void Faces(IAnsiConsole console, DrawingOutline drawing)
+    {
+        if (drawing.Faces.IsEmpty)
+        {
+            return;
+        }
+
+        var symbol = drawing.Report.Unit.Symbol;
+        var table = TableStyle.Columns("Face", "layer", $"area {symbol}²", $"around {symbol}");
+        for (var i = 0; i < drawing.Faces.Length; i++)
+        {
+            var face = drawing.Faces[i];
+            var size = drawing.Report.Extents.Diagonal;
+            table.AddRow(
+                new Text(TableStyle.Number(i + 1)),
+                new Text(face.Layer),
+                new Text(Digits.Of(face.Area)),
+                new Text($"({Digits.Near(face.Inside.X, size)}, {Digits.Near(face.Inside.Y, size)})"));
+        }
+
+        console.Write(table);
+    }
+
+    private static void Bars(IAnsiConsole console, DrawingOutline drawing, Lengths lengths)
+    {
+        if (drawing.Bars.IsEmpty)
+        {
+            return;
+        }
+
+        var table = TableStyle.Columns("Bars", "layer", "diameter " + lengths.Symbol(), "area " + lengths.Symbol(2));
+        foreach (var alike in drawing.Bars.GroupBy(b => (b.Source.Layer, b.Diameter)))
+        {
+            var area = alike.Key.Diameter is { } d ? lengths.Of(alike.Count() * 0.25 * Math.PI * d * d, 2) : "";
+            table.AddRow(
+                new Text(TableStyle.Number(alike.Count())),
+                new Text(alike.Key.Layer),
+                new Text(alike.Key.Diameter is { } diameter ? lengths.Of(diameter) : "not stated"),
+                new Text(area));
+        }
+
+        console.Write(table);
     }
 
     private static void Entities(IAnsiConsole console, string title, IReadOnlyList<EntityCount> counts, bool isReasoned)

@@ -80,7 +80,8 @@ internal sealed record DrawingPlane(SpacePoint X, SpacePoint Y, string? Name)
         return highest - lowest <= 1e-6 * size;
     }
 
-    private bool Holds(PlacedEntity placed)
+    /// <summary>True if an entity shows its true shape in this plane.</summary>
+    public bool Holds(PlacedEntity placed)
     {
         var normal = Normal;
         if (placed.Entity is FlatEntity flat)

@@ -16,20 +16,28 @@ internal sealed class BoundaryFinder(LocalFrame frame, JoinGap gap, string unrea
     // Nodes at which strands cross are this exact, as a part of the diagonal.
     private const double CrossingOverDiagonal = 1e-10;
 
-    private Splitter Splitter => new(gap.Length, CrossingOverDiagonal * frame.Diagonal, notes);
-
     /// <summary>What the pieces come to: strands without free ends.</summary>
     /// <exception cref="DrawingException">A boundary is open.</exception>
     public Linework Closed(List<Piece> pieces)
     {
         var joined = EndJoiner.Join(pieces, frame, gap, notes);
-        return joined.IsClosed ? joined : WithoutDangles(Splitter.SplitLoose(joined));
+        if (joined.IsClosed)
+        {
+            return joined;
+        }
+
+        var splitter = Splitter();
+        var rest = WithoutDangles(splitter.SplitLoose(joined));
+        NoteCuts(splitter, rest);
+        return rest;
     }
 
     /// <summary>The plane as strands divide it, cut where any of them meet; and those strands.</summary>
     public (PlanarMap Map, IReadOnlyList<Strand> Strands) Map(Linework linework)
     {
-        var split = Splitter.SplitAll(linework);
+        var splitter = Splitter();
+        var split = splitter.SplitAll(linework);
+        NoteCuts(splitter, split);
         while (true)
         {
             var map = PlanarMap.Of([.. split.Strands.Select(s => s.Edge)]);
@@ -65,7 +73,18 @@ internal sealed class BoundaryFinder(LocalFrame frame, JoinGap gap, string unrea
                 [free[first], free[second], .. free.Where((_, i) => i != first && i != second)], frame, gap, unread);
         }
 
-        chains.ForEach(notes.Dangling);
+        notes.Dangling(chains, rest);
         return rest;
+    }
+
+    private Splitter Splitter() => new(gap.Length, CrossingOverDiagonal * frame.Diagonal, notes);
+
+    /// <summary>Cuts of what was left out afterwards are not worth a word.</summary>
+    private void NoteCuts(Splitter splitter, Linework rest)
+    {
+        if (rest.Strands.Any(s => s.Begin != 0 || s.Stop != 1))
+        {
+            notes.Split(splitter.Crossings, splitter.Tees);
+        }
     }
 }

@@ -13,7 +13,11 @@ internal sealed class JoinNotes(LocalFrame frame)
     private const double RoundingOverDiagonal = 1e-9;
 
     private readonly List<DrawingNote> _notes = [];
+    private readonly List<Strand> _leadingNowhere = [];
     private readonly Dictionary<(PlacedEntity Dropped, PlacedEntity Kept), int> _duplicates = [];
+
+    /// <summary>What was left out since it bounds nothing.</summary>
+    public IReadOnlyList<Strand> LeadingNowhere => _leadingNowhere;
 
     /// <summary>Distances below this are rounding, mm.</summary>
     public double Rounding => RoundingOverDiagonal * frame.Diagonal + 4 * frame.Scale * frame.Spacing;
@@ -43,19 +47,40 @@ internal sealed class JoinNotes(LocalFrame frame)
         }
     }
 
-    public void Dangling(Chain chain)
+    /// <summary>Notes what leads nowhere: an entity of which nothing is left once, parts of others each by itself.</summary>
+    /// <param name="chains">What was left out.</param>
+    /// <param name="rest">What stays.</param>
+    public void Dangling(List<Chain> chains, Linework rest)
     {
-        var at = frame.ToDrawing(chain.Strands[0].Edge.Start);
-        EntitySource[] distinct = [.. chain.Strands.Select(s => s.Entity.Source).Distinct()];
-        _notes.Add(new DrawingNote(
-            NoteCode.DanglingLeftOut,
-            $"{Wording.Names(distinct)}: {Wording.Distance(chain.Length / frame.Scale)} from the free end at {Wording.At(at)} " +
-            "bound nothing and were left out.",
-            [.. distinct], at));
+        var stays = rest.Strands.Select(s => s.Entity).ToHashSet();
+        var isNoted = new HashSet<PlacedEntity>();
+        foreach (var chain in chains)
+        {
+            _leadingNowhere.AddRange(chain.Strands);
+            var at = frame.ToDrawing(chain.Strands[0].Edge.Start);
+            foreach (var entity in chain.Strands.Select(s => s.Entity).Where(e => !stays.Contains(e) && isNoted.Add(e)))
+            {
+                _notes.Add(new DrawingNote(
+                    NoteCode.DanglingLeftOut,
+                    $"{entity.Source} bounds nothing and was left out: it leads from a free end at {Wording.At(at)} on.",
+                    [entity.Source], at));
+            }
+
+            EntitySource[] parts = [.. chain.Strands.Where(s => stays.Contains(s.Entity)).Select(s => s.Entity.Source).Distinct()];
+            if (parts.Length > 0)
+            {
+                _notes.Add(new DrawingNote(
+                    NoteCode.DanglingLeftOut,
+                    $"{Wording.Distance(chain.Length / frame.Scale)} of {Wording.Names(parts)} from the free end at {Wording.At(at)} on " +
+                    "bound nothing and were left out.",
+                    [.. parts], at));
+            }
+        }
     }
 
     public void Bridge(Strand strand)
     {
+        _leadingNowhere.Add(strand);
         var at = frame.ToDrawing(strand.Edge.PointAt(0.5));
         _notes.Add(new DrawingNote(
             NoteCode.DanglingLeftOut,
@@ -65,16 +90,9 @@ internal sealed class JoinNotes(LocalFrame frame)
 
     public void Split(int crossings, int tees)
     {
-        if (crossings + tees > 0)
-        {
-            var what = (crossings, tees) switch
-            {
-                (0, _) => $"{Count(tees, "place")} where others end on them",
-                (_, 0) => $"{Count(crossings, "crossing")}",
-                _ => $"{Count(crossings, "crossing")} and {Count(tees, "place")} where others end on them",
-            };
-            _notes.Add(DrawingNote.About(NoteCode.LinesSplit, $"Lines were split at {what}."));
-        }
+        string[] places = [Count(crossings, "crossing"), Count(tees, "place") + " where others end on them"];
+        _notes.Add(DrawingNote.About(
+            NoteCode.LinesSplit, $"Lines were split at {string.Join(" and ", places.Where(p => p[0] != '0'))}."));
     }
 
     public void Closed(PlacedEntity polyline) => _notes.Add(DrawingNote.About(

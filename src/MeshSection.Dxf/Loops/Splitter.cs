@@ -14,6 +14,12 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
     // Tangents that differ by less, radians, may belong to curves that lie on each other.
     private const double SameDirection = 1e-3;
 
+    /// <summary>How many ends of others strands were cut at.</summary>
+    public int Tees { get; private set; }
+
+    /// <summary>How many crossings strands were cut at.</summary>
+    public int Crossings { get; private set; }
+
     /// <summary>Cuts the strands that do not close, and those that do where ends of the former lie on them.</summary>
     public Linework SplitLoose(Linework linework)
     {
@@ -41,7 +47,7 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
     {
         var teed = WithoutDuplicates(AtTees(linework, out var tees));
         var crossed = WithoutDuplicates(AtCrossings(teed, out var crossings));
-        notes.Split(crossings, tees);
+        (Tees, Crossings) = (Tees + tees, Crossings + crossings);
         return crossed;
     }
 

@@ -22,6 +22,9 @@ internal sealed class EntitySelection
     /// <summary>Circles and points on layers of bars, with the diameter of those drawn as points.</summary>
     public List<(PlacedEntity Placed, double? Diameter)> Bars { get; } = [];
 
+    /// <summary>What is seen in the drawing but was not chosen, by layer, colour or kind.</summary>
+    public List<PlacedEntity> NotChosen { get; } = [];
+
     /// <summary>The entities used, by kind and layer.</summary>
     public ImmutableArray<EntityCount> UsedCounts { get; private set; }
 
@@ -39,6 +42,10 @@ internal sealed class EntitySelection
             if (reason != LeftOutReason.None)
             {
                 selection.Count(placed, reason);
+                if (reason is LeftOutReason.LayerNotAsked or LeftOutReason.LayerIgnored or LeftOutReason.ColourNotAsked or LeftOutReason.NoBar)
+                {
+                    selection.NotChosen.Add(placed);
+                }
             }
             else if (rules.Bar(placed.Source.Layer) is { } bar)
             {
@@ -83,6 +90,7 @@ internal sealed class EntitySelection
         if (!IsOfFills)
         {
             fills.ForEach(f => Count(f, LeftOutReason.FillBesideLines));
+            NotChosen.AddRange(fills);
         }
 
         var sorted = _counts

@@ -14,9 +14,9 @@ public static class OutlineJson
     /// <summary>Writes a document: one indented object and a line end.</summary>
     /// <param name="stream">Where to; left open.</param>
     /// <param name="outline">The outline.</param>
-    /// <param name="report">How the drawing was understood; null if the outline is not of a drawing.</param>
+    /// <param name="drawing">How the drawing was understood; null if the outline is not of a drawing.</param>
     /// <param name="unit">The unit of length to write in.</param>
-    public static void Write(Stream stream, Outline outline, DrawingReport? report, LengthUnit unit) =>
+    public static void Write(Stream stream, Outline outline, DrawingOutline? drawing, LengthUnit unit) =>
         ResultWriter.Document(stream, json =>
         {
             var writer = new ResultWriter(json, unit);
@@ -24,9 +24,11 @@ public static class OutlineJson
             writer.Units(unit);
             json.WriteNumber("regions", outline.RegionCount);
             Boundaries(writer, outline);
-            if (report is not null)
+            if (drawing is not null)
             {
-                Drawing(writer, report);
+                Faces(writer, drawing);
+                Bars(writer, drawing);
+                Drawing(writer, drawing.Report);
             }
 
             json.WriteEndObject();
@@ -37,7 +39,7 @@ public static class OutlineJson
         writer.Json.WriteStartArray("boundaries");
         foreach (var nested in outline.Boundaries)
         {
-            var arcs = nested.Boundary.Edges.Count(e => e is ArcEdge);
+            var edges = nested.Boundary.Edges;
             writer.Json.WriteStartObject();
             writer.Json.WriteString("role", nested.Role.ToString().ToLowerInvariant());
             writer.Json.WriteNumber("region", nested.Region);
@@ -46,10 +48,60 @@ public static class OutlineJson
                 writer.Json.WriteNumber("parent", nested.Parent);
             }
 
-            writer.Json.WriteNumber("lines", nested.Boundary.Edges.Length - arcs);
-            writer.Json.WriteNumber("arcs", arcs);
+            writer.Json.WriteNumber("lines", edges.Count(e => e is LineEdge));
+            writer.Json.WriteNumber("arcs", edges.Count(e => e is ArcEdge));
+            writer.Json.WriteNumber("curves", edges.Count(e => e is BezierEdge));
             writer.Number("length", nested.Boundary.Length, 1);
             writer.Number("area", Math.Abs(nested.Boundary.SignedArea), 2);
+            writer.Json.WriteEndObject();
+        }
+
+        writer.Json.WriteEndArray();
+    }
+
+    private static void Faces(ResultWriter writer, DrawingOutline drawing)
+    {
+        if (drawing.Faces.IsEmpty)
+        {
+            return;
+        }
+
+        writer.Json.WriteStartArray("faces");
+        var unit = drawing.Report.Unit.Millimetres;
+        foreach (var face in drawing.Faces)
+        {
+            writer.Json.WriteStartObject();
+            writer.Json.WriteString("layer", face.Layer);
+            writer.Number("area", face.Area * unit * unit, 2);
+            writer.Number("x", face.Inside.X * unit, 1);
+            writer.Number("y", face.Inside.Y * unit, 1);
+            writer.Json.WriteEndObject();
+        }
+
+        writer.Json.WriteEndArray();
+    }
+
+    private static void Bars(ResultWriter writer, DrawingOutline drawing)
+    {
+        if (drawing.Bars.IsEmpty)
+        {
+            return;
+        }
+
+        writer.Json.WriteStartArray("bars");
+        foreach (var bar in drawing.Bars)
+        {
+            var place = bar.Place + drawing.Outline.Origin;
+            writer.Json.WriteStartObject();
+            writer.Json.WriteString("layer", bar.Source.Layer);
+            writer.Number("x", place.X, 1);
+            writer.Number("y", place.Y, 1);
+            if (bar.Diameter is { } diameter)
+            {
+                writer.Number("diameter", diameter, 1);
+                writer.Number("area", 0.25 * Math.PI * diameter * diameter, 2);
+            }
+
             writer.Json.WriteEndObject();
         }
 

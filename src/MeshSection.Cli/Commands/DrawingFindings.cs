@@ -1,0 +1,27 @@
+using MeshSection.Cli.Inputs;
+using MeshSection.Dxf;
+using MeshSection.Plots;
+
+namespace MeshSection.Cli.Commands;
+
+/// <summary>What was repaired, left out and found beside the boundaries of a drawing, for its picture.</summary>
+internal static class DrawingFindings
+{
+    /// <summary>A mark for each repair and caution that has a place, every line that took no part (which needs none), and the bars.</summary>
+    public static OutlineFindings Of(SectionInput input)
+    {
+        if (input.Drawing is not { Report: var report } drawing)
+        {
+            return OutlineFindings.None;
+        }
+
+        return new OutlineFindings(
+            [
+                .. report.Repairs.Concat(report.Cautions)
+                    .Where(note => note.Point is not null && note.Code != NoteCode.DanglingLeftOut)
+                    .Select(note => new OutlineMark(report.Unit.Millimetres * note.Point!.Value, note.Name)),
+            ],
+            [.. drawing.LeftOut.Select(l => new OutlinePiece(l.Edge, l.LeadsNowhere ? PieceRole.LeadsNowhere : PieceRole.LeftOut))],
+            [.. drawing.Bars.Select(b => new OutlineBar(b.Place, b.Diameter))]);
+    }
+}

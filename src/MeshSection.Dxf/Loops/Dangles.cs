@@ -21,7 +21,7 @@ internal sealed class Dangles(Linework linework, double diagonal)
     private const double ShortOverLength = 0.05;
     private const double ShortOverDiagonal = 0.005;
 
-    private readonly List<int>[] _ends = linework.Ends();
+    private readonly NodeEnds _ends = linework.Ends();
     private readonly bool[] _isLeft = new bool[linework.Strands.Count];
 
     /// <summary>The linework without its dangling chains.</summary>
@@ -37,7 +37,7 @@ internal sealed class Dangles(Linework linework, double diagonal)
             var chain = new List<Strand>();
             for (var node = free; degrees[node] == 1;)
             {
-                var s = _ends[node].Find(e => !_isLeft[e]);
+                var s = Next(node);
                 _isLeft[s] = true;
                 var strand = linework.Strands[s];
                 strand = strand.From == node ? strand : strand.Reversed();
@@ -54,6 +54,19 @@ internal sealed class Dangles(Linework linework, double diagonal)
         }
 
         return linework.With([.. linework.Strands.Where((_, s) => !_isLeft[s])]);
+    }
+
+    private int Next(int node)
+    {
+        foreach (var s in _ends[node])
+        {
+            if (!_isLeft[s])
+            {
+                return s;
+            }
+        }
+
+        throw new InvalidOperationException("A node of degree 1 has a strand.");
     }
 
     /// <summary>The two places that were meant to be one, if there are such; else null.</summary>

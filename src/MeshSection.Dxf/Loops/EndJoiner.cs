@@ -151,7 +151,7 @@ internal sealed class EndJoiner
         foreach (var (node, members) in merged.OrderBy(m => places[m.Key].X).ThenBy(m => places[m.Key].Y))
         {
             var spread = members.Aggregate(Box.Empty, (box, m) => box.With(_nodes.Points[m])).Diagonal;
-            var met = ends[node].ConvertAll(s => strands[s].Entity.Source);
+            var met = ends[node].ToArray().Select(s => strands[s].Entity.Source).ToList();
             if (met.Count > 2 && spread > _notes.Rounding)
             {
                 throw OutlineFaults.AmbiguousGap(met, places[node], spread, _frame, _gap);

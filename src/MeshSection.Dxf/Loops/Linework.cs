@@ -55,22 +55,7 @@ internal sealed class Linework(List<Point> nodes, List<Strand> strands)
     }
 
     /// <summary>The strands that end at each node.</summary>
-    public List<int>[] Ends()
-    {
-        var ends = new List<int>[nodes.Count];
-        for (var i = 0; i < ends.Length; i++)
-        {
-            ends[i] = new List<int>(2);
-        }
-
-        for (var s = 0; s < strands.Count; s++)
-        {
-            ends[strands[s].From].Add(s);
-            ends[strands[s].To].Add(s);
-        }
-
-        return ends;
-    }
+    public NodeEnds Ends() => new(nodes.Count, strands);
 
     /// <summary>The same nodes with other strands.</summary>
     public Linework With(List<Strand> others) => new(nodes, others);

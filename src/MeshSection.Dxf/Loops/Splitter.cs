@@ -25,14 +25,17 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
     {
         var ends = linework.Ends();
         var isLoose = new bool[linework.Strands.Count];
-        var open = new Stack<int>(Enumerable.Range(0, ends.Length).Where(n => ends[n].Count is not (0 or 2)));
+        var open = new Stack<int>(Enumerable.Range(0, ends.Count).Where(n => ends[n].Length is not (0 or 2)));
         while (open.TryPop(out var node))
         {
-            foreach (var s in ends[node].Where(s => !isLoose[s]))
+            foreach (var s in ends[node])
             {
-                isLoose[s] = true;
-                open.Push(linework.Strands[s].From);
-                open.Push(linework.Strands[s].To);
+                if (!isLoose[s])
+                {
+                    isLoose[s] = true;
+                    open.Push(linework.Strands[s].From);
+                    open.Push(linework.Strands[s].To);
+                }
             }
         }
 
@@ -111,10 +114,18 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
     /// True if a strand runs on along one that ends at the node, so that it may lie on it: where it only passes over a node of
     /// a closed loop, as a centre line does, nothing ends.
     /// </summary>
-    private static bool RunsAlong(Strand strand, double at, int node, List<int> ends, IReadOnlyList<Strand> strands)
+    private static bool RunsAlong(Strand strand, double at, int node, ReadOnlySpan<int> ends, IReadOnlyList<Strand> strands)
     {
         var along = strand.Edge.TangentAt(at);
-        return ends.Exists(e => Math.Abs(along.Cross(strands[e].Edge.TangentAt(strands[e].From == node ? 0 : 1))) < SameDirection);
+        foreach (var e in ends)
+        {
+            if (Math.Abs(along.Cross(strands[e].Edge.TangentAt(strands[e].From == node ? 0 : 1))) < SameDirection)
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     /// <summary>A node off the strand goes onto it, so that the strand keeps its shape.</summary>

@@ -3,8 +3,8 @@ using System.Collections.Immutable;
 namespace MeshSection.Geometry;
 
 /// <summary>
-/// Finds the first place at which two edges of a set of boundaries meet other than as neighbours. Edges are swept from
-/// left to right, and only those whose boxes overlap are compared.
+/// Finds the first place from the left at which two edges of a set of boundaries meet other than as neighbours. Only edges
+/// whose boxes overlap are compared.
 /// </summary>
 /// <param name="loops">The boundaries.</param>
 /// <param name="tolerance">The distance at which two edges touch, mm.</param>
@@ -31,21 +31,27 @@ internal sealed class ContactSearch(ImmutableArray<Boundary> loops, double toler
             }
         }
 
+        // From left to right, so that of several places the leftmost is told.
         var order = Enumerable.Range(0, places.Count).ToArray();
         Array.Sort(order, (i, j) => boxes[i].MinX.CompareTo(boxes[j].MinX) is var c && c != 0 ? c : i.CompareTo(j));
-        var active = new List<int>();
+        var ranks = new int[order.Length];
+        for (var rank = 0; rank < order.Length; rank++)
+        {
+            ranks[order[rank]] = rank;
+        }
+
+        var tree = new BoxTree([.. boxes]);
+        var near = new List<int>();
         foreach (var i in order)
         {
-            active.RemoveAll(j => boxes[j].MaxX < boxes[i].MinX);
-            foreach (var j in active)
+            near.Clear();
+            tree.Query(boxes[i], near);
+            near.RemoveAll(j => ranks[j] >= ranks[i]);
+            near.Sort((j, k) => ranks[j].CompareTo(ranks[k]));
+            foreach (var j in near)
             {
-                if (boxes[i].Meets(boxes[j]))
-                {
-                    Compare(places[Math.Min(i, j)], places[Math.Max(i, j)]);
-                }
+                Compare(places[Math.Min(i, j)], places[Math.Max(i, j)]);
             }
-
-            active.Add(i);
         }
     }
 

@@ -37,32 +37,23 @@ internal static class Nesting
         return nested.MoveToImmutable();
     }
 
-    /// <summary>
-    /// The smallest loop around each: sound boundaries never cross, so that one point of a loop tells. A sweep from left to
-    /// right looks only at loops that reach past the point.
-    /// </summary>
+    /// <summary>The smallest loop around each: sound boundaries never cross, so that one point of a loop tells.</summary>
     private static int[] Parents(ImmutableArray<Boundary> loops, double[] areas)
     {
-        var boxes = loops.Select(b => b.Bounds).ToArray();
-        var byLeft = Enumerable.Range(0, loops.Length).OrderBy(i => boxes[i].MinX).ToArray();
+        var tree = new BoxTree([.. loops.Select(b => b.Bounds)]);
         var parents = new int[loops.Length];
-        var active = new List<int>();
-        var next = 0;
-        foreach (var inner in Enumerable.Range(0, loops.Length).OrderBy(i => loops[i].Edges[0].Start.X))
+        var around = new List<int>();
+        for (var inner = 0; inner < parents.Length; inner++)
         {
             var point = loops[inner].Edges[0].Start;
-            for (; next < byLeft.Length && boxes[byLeft[next]].MinX <= point.X; next++)
-            {
-                active.Add(byLeft[next]);
-            }
-
-            active.RemoveAll(i => boxes[i].MaxX < point.X);
+            around.Clear();
+            tree.Query(Box.Of(point, point), around);
             parents[inner] = -1;
             var least = double.PositiveInfinity;
-            foreach (var outer in active)
+            foreach (var outer in around)
             {
                 var area = Math.Abs(areas[outer]);
-                if (outer != inner && area < least && boxes[outer].Contains(point) && WindingNumber.Of(loops[outer], point) != 0)
+                if (outer != inner && area < least && WindingNumber.Of(loops[outer], point) != 0)
                 {
                     (parents[inner], least) = (outer, area);
                 }

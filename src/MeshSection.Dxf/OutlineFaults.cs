@@ -120,6 +120,18 @@ internal static class OutlineFaults
         { Places = [.. met.Select(m => new EntityPlace(m, at))], Distance = spread / frame.Scale };
     }
 
+    public static DrawingException NothingLeft(JoinGap gap, LocalFrame frame) => new(
+        DrawingFault.ToleranceUnusable,
+        $"Ends are joined up to {Wording.Distance(gap.Length / frame.Scale)}, and that drew the two ends of every edge together. " +
+        "Give a smaller --tolerance, or leave out with --layer what lies far away: the tolerance follows from the drawing's size.")
+    { Tolerance = gap.Length / frame.Scale };
+
+    public static DrawingException RunTogether(EntitySource a, EntitySource b, Point at) => new(
+        DrawingFault.CrossingBoundaries,
+        $"{a} and {b} run along each other near {Wording.At(at)}, but not as one: where they cross cannot be told. Delete one of " +
+        "them, or draw them apart.")
+    { Places = [new EntityPlace(a, at), new EntityPlace(b, at)] };
+
     public static DrawingException Ambiguous(List<MapFaceWords> faces, IEnumerable<EntityPlace> meetings) => new(
         DrawingFault.Ambiguous,
         $"The lines divide the drawing into {faces.Count} faces, and which of them are material cannot be told: " +

@@ -28,7 +28,14 @@ internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
 
     public static LocalFrame Of(List<DrawnEntity> entities, LengthUnit unit)
     {
-        var anchor = Anchor(entities);
+        var stated = Stated(entities);
+        var reach = entities.SelectMany(e => e.Curves).Aggregate(Farthest(stated), (most, curve) => Math.Max(most, Reach(curve)));
+        if (stated != Box.Empty && !(reach < Greatest))
+        {
+            throw OutlineFaults.ExtentsUnusable(stated, unit);
+        }
+
+        var anchor = new Point(stated.MinX, stated.MinY);
         var box = BoundsFrom(anchor, entities);
         if (box == Box.Empty)
         {
@@ -65,8 +72,8 @@ internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
         return whole + Math.Round((anchor - whole + offset) / step) * step;
     }
 
-    /// <summary>The least coordinates that the entities state.</summary>
-    private static Point Anchor(List<DrawnEntity> entities)
+    /// <summary>What the coordinates that the entities state span.</summary>
+    private static Box Stated(List<DrawnEntity> entities)
     {
         var box = Box.Empty;
         foreach (var curve in entities.SelectMany(e => e.Curves))
@@ -87,13 +94,21 @@ internal sealed record LocalFrame(Point Origin, Box Extents, double Scale)
                     box = box.With(elliptic.Centre);
                     break;
                 case FreeCurve free:
-                    box = box.With(free.Controls[0]).With(free.Controls[^1]);
+                    box = free.Controls.Aggregate(box, (b, c) => b.With(c));
                     break;
             }
         }
 
-        return new Point(box.MinX, box.MinY);
+        return box;
     }
+
+    /// <summary>How far curves may reach from what they state: the half axes of ellipses, the rise of bulges.</summary>
+    private static double Reach(PlaneCurve curve) => curve switch
+    {
+        EllipticCurve elliptic => elliptic.U.Length + elliptic.V.Length,
+        BulgedCurve bulged => bulged.Start.DistanceTo(bulged.End) * (1 + Math.Abs(bulged.Bulge)),
+        _ => 0,
+    };
 
     private static Box BoundsFrom(Point anchor, List<DrawnEntity> entities)
     {

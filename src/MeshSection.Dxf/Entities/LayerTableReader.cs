@@ -40,8 +40,9 @@ internal sealed class LayerTableReader(TagReader tags, TagText text)
                     name = text.Decode(tags.Value);
                     break;
                 case 62:
-                    isOff = Integer(name) < 0;
-                    colour = colour with { Index = Math.Abs(Integer(name)) };
+                    var index = Integer(name);
+                    isOff = index < 0;
+                    colour = colour with { Index = index < 0 && index != int.MinValue ? -index : index };
                     break;
                 case 70:
                     isFrozen = (Integer(name) & 1) != 0;

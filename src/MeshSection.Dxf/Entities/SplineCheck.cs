@@ -10,6 +10,9 @@ internal static class SplineCheck
     // No program draws splines of a higher degree.
     private const int HighestDegree = 25;
 
+    // Beyond this ratio of weights no digit of the curve between them is left.
+    private const double MostUneven = 1e9;
+
     // Knots that fall by less than this part of their range do so by rounding.
     private const double KnotRounding = 1e-9;
 
@@ -49,9 +52,9 @@ internal static class SplineCheck
             throw ReadingFaults.BadValue(source, 41, $"{weights.Count} weights for {controls.Count} control points");
         }
 
-        if (weights.Exists(w => !(w > 0)))
+        if (weights.Exists(w => !(w > 0)) || (weights.Count > 0 && weights.Max() > MostUneven * weights.Min()))
         {
-            throw ReadingFaults.BadValue(source, 41, "a weight that is not above zero");
+            throw ReadingFaults.BadValue(source, 41, $"weights that are not above zero, or some {MostUneven:E0} times others");
         }
 
         ImmutableArray<double> ones = [.. Enumerable.Repeat(1.0, controls.Count)];

@@ -66,6 +66,11 @@ internal sealed class BoundaryFinder(LocalFrame frame, JoinGap gap, string unrea
             throw OutlineFaults.Open([a, b, .. free.Where(f => f != a && f != b)], frame, gap, unread);
         }
 
+        if (free.Count == 0 && rest.Strands.Count == 0)
+        {
+            throw OutlineFaults.NothingLeft(gap, frame);
+        }
+
         if (rest.Strands.Count == 0)
         {
             var (first, second) = NearestPair.Of([.. Enumerable.Range(0, free.Count)], [.. free.Select(f => f.Place)]);

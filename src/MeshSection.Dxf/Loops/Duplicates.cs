@@ -38,7 +38,8 @@ internal static class Duplicates
     private static double Rise(Edge edge, bool isForward)
     {
         var sag = edge.Sag;
-        return sag > 0 && edge.CapArea > 0 != isForward ? -sag : sag;
+        var isOnRight = sag > 0 && edge.Chord.Cross(edge.PointAt(0.5) - edge.Start) < 0;
+        return sag > 0 && isOnRight != isForward ? -sag : sag;
     }
 
     private readonly record struct Candidate(int From, int To, double Rise, int Number) : IComparable<Candidate>

@@ -124,7 +124,11 @@ internal sealed class EndJoiner
         for (var i = 0; i < _pieces.Count; i++)
         {
             var (from, to) = (_nodes.Start(i), _nodes.End(i));
-            if (!_dropped[i] && from != to)
+            if (!_dropped[i] && from == to)
+            {
+                _notes.Sliver(_pieces[i].Entity.Source, _pieces[i].Edge.Start, _pieces[i].Edge.Chord.Length);
+            }
+            else if (!_dropped[i])
             {
                 strands.Add(Strand.Of(from, to, Moved(_pieces[i].Edge, places[from], places[to]), _pieces[i].Entity));
             }

@@ -100,6 +100,10 @@ internal sealed class JoinNotes(LocalFrame frame)
         $"{polyline.Source} is not marked as closed, but its ends meet; it was taken as closed.",
         polyline.Source));
 
+    /// <summary>The refusal of two curves that lie on each other in part, so near to it that they cannot be told apart.</summary>
+    public DrawingException RunTogether(Strand a, Strand b) => OutlineFaults.RunTogether(
+        a.Entity.Source, b.Entity.Source, frame.ToDrawing(a.Edge.PointAt(NearestOnEdge.Parameter(a.Edge, b.Edge.PointAt(0.5)))));
+
     /// <summary>All notes.</summary>
     public IEnumerable<DrawingNote> All() => _notes.Concat(_duplicates.Select(d => DuplicateNote(d.Key.Dropped, d.Key.Kept, d.Value)));
 

@@ -180,7 +180,9 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
             near.Sort();
             foreach (var (s, other) in near.Where(j => j > i).Select(j => (loose[i], loose[j])))
             {
-                foreach (var (a, b) in EdgeCrossings.Find(strands[s].Edge, strands[other].Edge, crossingTolerance))
+                var found = EdgeCrossings.Find(strands[s].Edge, strands[other].Edge, crossingTolerance)
+                    ?? throw notes.RunTogether(strands[s], strands[other]);
+                foreach (var (a, b) in found)
                 {
                     var node = NodeAt(strands[s].Edge.PointAt(a), s, other);
                     cuts.Add(s, a, node);

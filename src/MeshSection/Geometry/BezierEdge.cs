@@ -63,7 +63,7 @@ public sealed record BezierEdge : Edge
 
     /// <inheritdoc/>
     public override double CapArea =>
-        GaussLegendre.Integral(t => 0.5 * (PointAt(t) - Start).Cross(VelocityAt(t)), Chord.Dot(Chord));
+        GaussLegendre.Integral(t => 0.5 * OffsetAt(t).Cross(VelocityAt(t)), Chord.Dot(Chord));
 
     /// <inheritdoc/>
     public override Box Bounds
@@ -98,6 +98,12 @@ public sealed record BezierEdge : Edge
             return End;
         }
 
+        return Start + OffsetAt(t);
+    }
+
+    /// <summary>The way from the start to the point at a parameter, which loses no digits far from the origin.</summary>
+    internal Point OffsetAt(double t)
+    {
         Span<Homogeneous> steps = stackalloc Homogeneous[Controls.Length];
         Fill(steps);
         Reduce(steps, t, 1);
@@ -161,7 +167,7 @@ public sealed record BezierEdge : Edge
         var weights = ImmutableArray.CreateBuilder<double>(steps.Length);
         foreach (var step in steps)
         {
-            controls.Add(step.Point);
+            controls.Add(Start + step.Point);
             weights.Add(step.W);
         }
 
@@ -270,11 +276,13 @@ public sealed record BezierEdge : Edge
         return true;
     }
 
+    /// <summary>The control points as seen from the start.</summary>
     private void Fill(Span<Homogeneous> steps)
     {
         for (var i = 0; i < steps.Length; i++)
         {
-            steps[i] = new Homogeneous(Weights[i] * Controls[i].X, Weights[i] * Controls[i].Y, Weights[i]);
+            var way = Controls[i] - Start;
+            steps[i] = new Homogeneous(Weights[i] * way.X, Weights[i] * way.Y, Weights[i]);
         }
     }
 

@@ -9,18 +9,30 @@ internal static class EdgeCrossings
     // Off the middle, where curves often cross: a crossing at the end of a piece could be lost, or found twice.
     private const double Split = 0.4871;
 
-    /// <summary>The parameters on both edges of their crossings; those at ends are left out.</summary>
+    // Two curves that cross take some hundred pairs of pieces; those that run along each other take them without end.
+    private const int MostPairs = 20_000;
+
+    /// <summary>
+    /// The parameters on both edges of their crossings; those at ends are left out. Null if they run along each other for a
+    /// part of their length.
+    /// </summary>
     /// <param name="a">An edge.</param>
     /// <param name="b">Another.</param>
     /// <param name="tolerance">How near to an end a crossing is one at the end, and how exact curves are followed, mm.</param>
-    public static List<(double A, double B)> Find(Edge a, Edge b, double tolerance)
+    public static List<(double A, double B)>? Find(Edge a, Edge b, double tolerance)
     {
         var found = new List<(double A, double B)>();
+        var pairs = 0;
         Search(a, 0, 1, b, 0, 1);
-        return found;
+        return pairs <= MostPairs ? found : null;
 
         void Search(Edge p, double fromA, double toA, Edge q, double fromB, double toB)
         {
+            if (++pairs > MostPairs)
+            {
+                return;
+            }
+
             var (sagP, sagQ) = (p.Sag, q.Sag);
             if (EdgeContact.ChordDistance(p.Start, p.End, q.Start, q.End) > sagP + sagQ)
             {

@@ -58,7 +58,7 @@ internal static class CapMoments
         foreach (var (at, weight) in GaussLegendre.Points)
         {
             var t = from + at * (to - from);
-            var p = curve.PointAt(t) - curve.Start;
+            var p = curve.OffsetAt(t);
             var w = (to - from) * weight * p.Cross(curve.VelocityAt(t));
             sum += new AreaMoments(w / 2, w * p.X / 3, w * p.Y / 3, w * p.X * p.X / 4, w * p.Y * p.Y / 4, w * p.X * p.Y / 4);
         }

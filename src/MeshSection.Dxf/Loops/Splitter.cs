@@ -152,7 +152,9 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
 
     private Linework WithoutDuplicates(Linework linework)
     {
-        var strands = linework.Strands;
+        // Of two that lie on each other the one of a closed loop stays, then the part of the longer piece: which was drawn
+        // first does not show.
+        List<Strand> strands = [.. linework.Strands.OrderBy(s => s.IsLoose).ThenByDescending(s => s.Whole.Chord.Length).ThenBy(s => LeastEnd(s.Whole))];
         var isDropped = new bool[strands.Count];
         foreach (var (dropped, kept) in Duplicates.Find(strands.Select((s, i) => (s.From, s.To, s.Edge, i)), linework.Nodes, tolerance))
         {
@@ -161,6 +163,12 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
         }
 
         return linework.With([.. strands.Where((_, s) => !isDropped[s])]);
+
+        static (double X, double Y) LeastEnd(Edge edge)
+        {
+            var (start, end) = ((edge.Start.X, edge.Start.Y), (edge.End.X, edge.End.Y));
+            return start.CompareTo(end) < 0 ? start : end;
+        }
     }
 
     private Linework AtCrossings(Linework linework, out int crossings)

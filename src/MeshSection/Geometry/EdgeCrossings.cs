@@ -65,6 +65,7 @@ internal static class EdgeCrossings
 
         void Add(double s, double t)
         {
+            (s, t) = Polished(a, s, b, t);
             var point = a.PointAt(s);
             var isAtEnd = IsNear(point, a.Start) || IsNear(point, a.End) || IsNear(point, b.Start) || IsNear(point, b.End);
             if (!isAtEnd && !found.Exists(f => IsNear(a.PointAt(f.A), point)))
@@ -74,6 +75,31 @@ internal static class EdgeCrossings
         }
 
         bool IsNear(Point p, Point q) => p.DistanceTo(q) <= tolerance;
+    }
+
+    /// <summary>Newton's steps from where chords cross, as long as they bring the two points nearer to each other.</summary>
+    private static (double S, double T) Polished(Edge a, double s, Edge b, double t)
+    {
+        var apart = a.PointAt(s).DistanceTo(b.PointAt(t));
+        for (var step = 0; step < 5 && apart > 0; step++)
+        {
+            var (way, u, v) = (b.PointAt(t) - a.PointAt(s), a.VelocityAt(s), b.VelocityAt(t));
+            var (nextS, nextT) = (s + way.Cross(v) / u.Cross(v), t + way.Cross(u) / u.Cross(v));
+            if (!(nextS >= 0 && nextS <= 1 && nextT >= 0 && nextT <= 1))
+            {
+                break;
+            }
+
+            var nearer = a.PointAt(nextS).DistanceTo(b.PointAt(nextT));
+            if (!(nearer < apart))
+            {
+                break;
+            }
+
+            (s, t, apart) = (nextS, nextT, nearer);
+        }
+
+        return (s, t);
     }
 
     private static (double S, double T)? OfChords(Edge p, Edge q)

@@ -63,12 +63,18 @@ internal sealed class MapFaces
             [.. walk._loopOfHalf.Select(l => faceOfLoop[l])]);
     }
 
+    /// <summary>The area to the left of a loop; edges that it runs along both ways enclose nothing, in every bit.</summary>
     private double Area(ImmutableArray<DirectedEdge> loop)
     {
         var anchor = _edges[loop[0].Edge].Start;
         var area = 0.0;
         foreach (var (edge, isForward) in loop)
         {
+            if (_loopOfHalf[2 * edge] == _loopOfHalf[2 * edge + 1])
+            {
+                continue;
+            }
+
             var e = _edges[edge];
             var part = 0.5 * (e.Start - anchor).Cross(e.End - anchor) + e.CapArea;
             area += isForward ? part : -part;

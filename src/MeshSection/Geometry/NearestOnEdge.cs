@@ -1,12 +1,12 @@
 namespace MeshSection.Geometry;
 
-/// <summary>Finds the place on an edge that is nearest to a point.</summary>
+/// <summary>Finds the place on an edge that is nearest to a point which lies about on it.</summary>
 internal static class NearestOnEdge
 {
-    // An edge turns by half a circle at most: in quarters of its parameter the distance has one least value each.
-    private const int Parts = 4;
+    // An edge turns by half a circle at most: in so many parts it is so straight that, near it, each has one nearest place.
+    private const int Parts = 16;
 
-    /// <summary>The parameter of the nearest place.</summary>
+    /// <summary>The parameter of the nearest place, for a point nearer to the edge than to its centre of curvature.</summary>
     public static double Parameter(Edge edge, Point point)
     {
         if (edge is LineEdge)

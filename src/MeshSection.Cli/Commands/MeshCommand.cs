@@ -17,7 +17,7 @@ internal static class MeshCommand
 
     public static Command Create(Terminal terminal)
     {
-        var (input, mesh, detail, output) = (new InputOptions(), new MeshOptions(), new MeshDetailOptions(), new OutputOptions(MeshOutput.Extensions));
+        var (input, mesh, detail, output) = (new InputOptions(), new MeshOptions(), new MeshDetailOptions(), new OutputOptions("the mesh", MeshOutput.Extensions));
         var command = new Command("mesh", "Mesh a section, show the quality of the mesh, and write it for other programs.");
         input.AddTo(command);
         mesh.AddTo(command);
@@ -45,7 +45,7 @@ internal static class MeshCommand
             Picture.Save(MeshFigure.Of(input.Section, mesh, report, input.Unit), picture, terminal, output);
         }
 
-        if (!output.MeshFiles.IsEmpty)
+        if (!output.DataFiles.IsEmpty)
         {
             MeshOutput.Save(flat, mesh, isSecondOrder, input.Unit, terminal, output);
         }

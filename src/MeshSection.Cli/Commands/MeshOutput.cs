@@ -22,7 +22,7 @@ internal static class MeshOutput
         var file = isSecondOrder
             ? MeshFile.OfSecondOrder(flat, CurvedMesh.Fit(flat, mesh), unit)
             : MeshFile.OfFirstOrder(flat, mesh, unit);
-        foreach (var path in output.MeshFiles)
+        foreach (var path in output.DataFiles)
         {
             Save(file, path);
             if (!output.IsQuiet && !output.IsJson)

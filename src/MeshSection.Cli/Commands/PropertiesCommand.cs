@@ -17,7 +17,7 @@ internal static class PropertiesCommand
 
     public static Command Create(Terminal terminal)
     {
-        var (input, mesh, output) = (new InputOptions(), new MeshOptions(), new OutputOptions());
+        var (input, mesh, output) = (new InputOptions(), new MeshOptions(), new OutputOptions("an overlay for the drawing", OverlayOutput.Extension));
         var density = new DensityOption();
         var command = new Command("properties", "Compute every area property of a section.");
         input.AddTo(command);
@@ -34,6 +34,7 @@ internal static class PropertiesCommand
 
     private static int Run(Terminal terminal, InputRequest request, MeshRequest meshRequest, OutputRequest output)
     {
+        OverlayOutput.Check(request, output);
         var input = SectionInput.Read(request);
         var (flat, mesh) = meshRequest.Apply(input.Section, input.Unit, Memory);
         var isConnected = input.Section.Outline.RegionCount == 1;
@@ -45,6 +46,7 @@ internal static class PropertiesCommand
             Picture.Save(SectionFigure.Of(input.Section, mesh, properties, input.Unit), picture, terminal, output);
         }
 
+        OverlayOutput.Save(input, properties, torsion, terminal, output);
         if (output.IsJson)
         {
             terminal.WriteJson(stream => PropertiesJson.Write(stream, properties, torsion, input.Unit));

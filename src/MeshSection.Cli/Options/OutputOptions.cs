@@ -23,13 +23,14 @@ internal sealed class OutputOptions
         Arity = ArgumentArity.Zero,
     };
 
-    /// <param name="meshFiles">Extensions of files other than pictures that --out may name.</param>
-    public OutputOptions(params string[] meshFiles)
+    /// <param name="what">What files other than pictures hold, such as "the mesh"; null if there are none.</param>
+    /// <param name="extensions">The extensions of such files.</param>
+    public OutputOptions(string? what = null, params string[] extensions)
     {
-        _extensions = [Picture, .. meshFiles];
-        _out.Description = meshFiles.Length == 0
+        _extensions = [Picture, .. extensions];
+        _out.Description = what is null
             ? "Write a picture (.png)"
-            : $"Write a picture (.png) or the mesh ({string.Join(", ", meshFiles)}). May be repeated";
+            : $"Write a picture (.png) or {what} ({string.Join(", ", extensions)}). May be repeated";
     }
 
     /// <summary>Adds the options to a command.</summary>
@@ -79,7 +80,7 @@ internal sealed class OutputOptions
 /// <summary>Where results are to go.</summary>
 /// <param name="IsJson">As JSON on standard output instead of a table.</param>
 /// <param name="Pictures">Paths of the pictures to write.</param>
-/// <param name="MeshFiles">Paths of the mesh files to write.</param>
+/// <param name="DataFiles">Paths of the other files to write.</param>
 /// <param name="IsQuiet">No table and no cautions.</param>
 internal sealed record OutputRequest(
-    bool IsJson, ImmutableArray<string> Pictures, ImmutableArray<string> MeshFiles, bool IsQuiet);
+    bool IsJson, ImmutableArray<string> Pictures, ImmutableArray<string> DataFiles, bool IsQuiet);

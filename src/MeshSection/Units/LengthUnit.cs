@@ -55,6 +55,9 @@ public sealed record LengthUnit(string Symbol, string Name, double Millimetres)
     /// <returns>The unit; null if the code is 0, which means "no unit", or is none that the format knows.</returns>
     public static LengthUnit? FromDrawingCode(int code) => code >= 1 && code <= ByCode.Length ? ByCode[code - 1] : null;
 
+    /// <summary>The value of $INSUNITS by which a drawing states this unit.</summary>
+    public int DrawingCode => ByCode.IndexOf(this) + 1;
+
     /// <summary>
     /// Finds a unit by symbol or name: "mm", "um", "inch", "Feet", "millimeters". Symbols are matched exactly first
     /// (so that "Gm" and "mm" stay apart), then without regard to case; names may be plural and may be spelled the

@@ -1,4 +1,3 @@
-using System.Diagnostics;
 using System.Globalization;
 using System.Text.Json;
 using MeshSection.Files.Meshes;
@@ -9,8 +8,6 @@ namespace MeshSection.Files.Tests.Meshes;
 /// <summary>Mesh files read by a library that we did not write: meshio, Debian package python3-meshio.</summary>
 public class OutsideReaderTests
 {
-    private const string Python = "/usr/bin/python3";
-
     private const string Script =
         """
         import json, sys, meshio
@@ -28,7 +25,7 @@ public class OutsideReaderTests
     [InlineData(".msh", 2, "triangle6", "gmsh:physical")]
     public void Meshio_reads_the_same_mesh(string extension, int order, string type, string regions)
     {
-        Assert.SkipUnless(Runs("import meshio"), $"needs {Python} with meshio (Debian package python3-meshio)");
+        OutsidePython.SkipWithout("meshio");
         var file = Meshed.Tube.Of(order);
         var path = Path.Combine(Path.GetTempPath(), Path.GetRandomFileName() + extension);
         try
@@ -39,7 +36,7 @@ public class OutsideReaderTests
                 else MshWriter.Write(stream, file);
             }
 
-            using var read = JsonDocument.Parse(Run(Script, path).Split('\n')[^1]);
+            using var read = JsonDocument.Parse(OutsidePython.Run(Script, path).Split('\n')[^1]);
             Point[] nodes = [.. Rows<double>(read.RootElement.GetProperty("points")).Select(r => new Point(r[0], r[1]))];
             int[][] elements = Rows<int>(read.RootElement.GetProperty("cells").GetProperty(type));
             Assert.Equal(file.Nodes, nodes);
@@ -61,27 +58,4 @@ public class OutsideReaderTests
 
     private static T[][] Rows<T>(JsonElement rows) =>
         [.. rows.EnumerateArray().Select(r => r.EnumerateArray().Select(n => (T)Convert.ChangeType(n.GetDouble(), typeof(T), CultureInfo.InvariantCulture)).ToArray())];
-
-    private static bool Runs(string code) => File.Exists(Python) && Start(code).ExitCode == 0;
-
-    private static string Run(string code, string argument)
-    {
-        var (exit, output) = Start(code, argument);
-        Assert.Equal(0, exit);
-        return output;
-    }
-
-    private static (int ExitCode, string Output) Start(string code, params string[] arguments)
-    {
-        using var process = Process.Start(new ProcessStartInfo(Python, ["-c", code, .. arguments])
-        {
-            RedirectStandardOutput = true,
-            RedirectStandardError = true,
-        })!;
-        process.ErrorDataReceived += (_, _) => { };
-        process.BeginErrorReadLine();
-        var output = process.StandardOutput.ReadToEnd();
-        process.WaitForExit();
-        return (process.ExitCode, output.TrimEnd());
-    }
 }

@@ -48,10 +48,46 @@ internal sealed class Splitter(double tolerance, double crossingTolerance, JoinN
 
     private Linework Split(Linework linework)
     {
-        var teed = WithoutDuplicates(AtTees(linework, out var tees));
+        var teed = WithoutDuplicates(AtTees(Merged(linework), out var tees));
         var crossed = WithoutDuplicates(AtCrossings(teed, out var crossings));
         (Tees, Crossings) = (Tees + tees, Crossings + crossings);
         return crossed;
+    }
+
+    /// <summary>
+    /// Nodes that differ by rounding only become one: curves that lie on each other may state their corners in different ways.
+    /// </summary>
+    private Linework Merged(Linework linework)
+    {
+        var nodes = linework.Nodes;
+        var same = Math.Min(notes.Rounding, tolerance);
+        var tree = new BoxTree([.. nodes.Select(n => Box.Of(n, n))]);
+        var names = new int[nodes.Count];
+        var near = new List<int>();
+        for (var node = 0; node < names.Length; node++)
+        {
+            near.Clear();
+            tree.Query(Box.Of(nodes[node], nodes[node]).Grown(same), near);
+            names[node] = near.Where(n => n <= node && nodes[n].DistanceTo(nodes[node]) <= same).Min(n => n == node ? node : names[n]);
+        }
+
+        var strands = new List<Strand>(linework.Strands.Count);
+        foreach (var strand in linework.Strands)
+        {
+            var (from, to) = (names[strand.From], names[strand.To]);
+            var isSame = nodes[from] == nodes[strand.From] && nodes[to] == nodes[strand.To];
+            if (from != to)
+            {
+                strands.Add(isSame ? strand with { From = from, To = to } : strand with
+                {
+                    From = from,
+                    To = to,
+                    Edge = strand.Edge.Between(nodes[from], nodes[to]),
+                });
+            }
+        }
+
+        return linework.With(strands);
     }
 
     private Linework AtTees(Linework linework, out int tees)

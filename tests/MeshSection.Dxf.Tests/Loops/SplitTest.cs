@@ -68,6 +68,18 @@ public class SplitTest
         Assert.Equal([5.0, 5.0], result.LeftOut.Where(l => l.LeadsNowhere).Select(l => l.Edge.Length));
     }
 
+    [Theory]
+    [InlineData(0.4, 2.2)]
+    [InlineData(3, 7)]
+    public void A_part_of_an_ellipse_over_the_whole_of_it_counts_once(double from, double to)
+    {
+        string Ellipse(string handle, double start, double end) => Tagged(
+            (0, "ELLIPSE"), (5, handle), (8, "0"), (10, 5.0), (20, 7.0), (30, 0.0), (11, 40.0), (21, 15.0), (31, 0.0), (40, 0.6), (41, start), (42, end));
+        var result = Outline(Drawing([Ellipse("1", 0, Math.Tau), Ellipse("2", from, to)]));
+        Assert.Equal(Math.PI * 0.6 * (40 * 40 + 15 * 15), Assert.Single(result.Outline.Boundaries).Boundary.SignedArea, 1e-9);
+        Assert.Contains(result.Report.Repairs, r => r.Code == NoteCode.DuplicateDropped);
+    }
+
     [Fact]
     public void Centre_lines_over_a_closed_outline_change_no_bit_of_it()
     {

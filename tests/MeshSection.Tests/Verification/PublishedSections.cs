@@ -19,6 +19,9 @@ internal static class PublishedSections
         "geo-quarter-circle" => [Sector(50, 0, 90, throughCentre: true)],
         "geo-circular-segment" => [Sector(50, 40, 140, throughCentre: false)],
         "geo-circular-sector" => [Sector(50, 40, 140, throughCentre: true)],
+        "geo-ellipse" or "pl-ellipse" => [Ellipse(60, 40)],
+        "geo-parabolic-segment" => [Parabola(new(50, 0), new(0, 120), new(-50, 0))],
+        "geo-parabolic-spandrel" => [Parabola(new(100, 60), new(50, 0), new(0, 0), new LineEdge(new(0, 0), new(100, 0)), new LineEdge(new(100, 0), new(100, 60)))],
         "geo-hexagon" or "pl-hexagon" => new RegularPolygon(6, 50 * Math.Sqrt(3)).Boundaries(),
         "geo-triangle" => Polygon((0, 0), (120, 0), (40, 90)),
         "geo-right-triangle" => Polygon((0, 0), (120, 0), (0, 90)),
@@ -50,6 +53,18 @@ internal static class PublishedSections
         "rs-c10x20" => Inches(new Channel(10, 2.74, 0.436, 0.379, FlangeSlope: 1.0 / 6)),
         _ => throw new ArgumentOutOfRangeException(nameof(id), id, "No section is known for this case."),
     };
+
+    /// <summary>An ellipse as four quarters, each exactly a rational curve of degree 2.</summary>
+    private static Boundary Ellipse(double a, double b) => Boundary.Create(Enumerable.Range(0, 4).Select(q =>
+    {
+        var (c, s) = (Math.Round(Math.Cos(q * Math.PI / 2)), Math.Round(Math.Sin(q * Math.PI / 2)));
+        Point At(double x, double y) => new(a * (c * x - s * y), b * (s * x + c * y));
+        return new BezierEdge([At(1, 0), At(1, 1), At(0, 1)], [1, Math.Sqrt(0.5), 1]);
+    }));
+
+    /// <summary>A parabola of one control point, closed by lines: by its chord if none are given.</summary>
+    private static Boundary Parabola(Point start, Point control, Point end, params ReadOnlySpan<Edge> lines) => Boundary.Create(
+        [.. BezierPieces.Of([start, control, end], [1, 1, 1], 0), .. lines.IsEmpty ? [new LineEdge(end, start)] : lines.ToArray()]);
 
     private static ImmutableArray<Boundary> Polygon(params ReadOnlySpan<(double X, double Y)> corners)
     {

@@ -16,6 +16,8 @@ internal static class Quantities
         "secondMoment.y" => p.SecondMoment.Y,
         "secondMoment.xy" => p.SecondMoment.XY,
         "secondMoment.polar" => p.SecondMoment.Polar,
+        "secondMomentDatum.x" => p.SecondMomentDatum.X,
+        "secondMomentDatum.y" => p.SecondMomentDatum.Y,
         "secondMomentDatum.xy" => p.SecondMomentDatum.XY,
         "principal.I1" => p.Principal.I1,
         "principal.I2" => p.Principal.I2,

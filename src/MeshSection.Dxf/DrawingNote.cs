@@ -101,6 +101,9 @@ public enum NoteCode
 
     /// <summary>Lines divide the section into faces that were taken as one.</summary>
     FacesTogether = 409,
+
+    /// <summary>A hole lies on another layer than the boundary around it: it may be another material.</summary>
+    HoleOnOtherLayer = 410,
 }
 
 /// <summary>Something that a person should know about how a drawing was understood.</summary>

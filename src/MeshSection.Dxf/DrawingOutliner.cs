@@ -59,7 +59,7 @@ public static class DrawingOutliner
         }
 
         notes.AddRange(joined.All());
-        NoteNesting(outline, frame, notes);
+        NoteNesting(outline, loops, frame, notes);
         var bars = BarList.Of(selection, plane, frame, outline, notes);
         var report = new DrawingReport
         {
@@ -143,7 +143,7 @@ public static class DrawingOutliner
         }
     }
 
-    private static void NoteNesting(Outline outline, LocalFrame frame, List<DrawingNote> notes)
+    private static void NoteNesting(Outline outline, List<Loop> loops, LocalFrame frame, List<DrawingNote> notes)
     {
         for (var b = 0; b < outline.Boundaries.Length; b++)
         {
@@ -156,6 +156,22 @@ public static class DrawingOutliner
                     "leave it out with --layer, or choose with --inside.",
                     [], at));
             }
+            else if (outline.Boundaries[b] is { Role: BoundaryRole.Hole, Parent: var parent, Boundary: var hole })
+            {
+                NoteOtherLayer(loops[b].Entities[0].Source, loops[parent].Entities[0].Source, frame.ToDrawing(hole.Edges[0].Start), notes);
+            }
+        }
+    }
+
+    private static void NoteOtherLayer(EntitySource hole, EntitySource outer, Point at, List<DrawingNote> notes)
+    {
+        if (!hole.Layer.Equals(outer.Layer, StringComparison.OrdinalIgnoreCase))
+        {
+            notes.Add(new DrawingNote(
+                NoteCode.HoleOnOtherLayer,
+                $"{hole} lies within {outer} at {Wording.At(at)}: it was taken as a hole. If it is another material, name both " +
+                $"layers: --region '{Wording.Shown(outer.Layer)}' --region '{Wording.Shown(hole.Layer)}'.",
+                [hole, outer], at));
         }
     }
 

@@ -15,7 +15,7 @@ internal static class OutlineFaults
 {
     public static DrawingException NoSuchLayer(string pattern, ImmutableArray<Layer> layers) => new(
         DrawingFault.NoSuchLayer,
-        $"No layer matches '{pattern}'. The drawing has {string.Join(", ", layers.Take(20).Select(l => $"'{l.Name}'"))}" +
+        $"No layer matches '{pattern}'. The drawing has {string.Join(", ", layers.Take(20).Select(l => $"'{Wording.Shown(l.Name)}'"))}" +
         (layers.Length > 20 ? $" and {layers.Length - 20} more." : "."));
 
     public static DrawingException NothingUsed(EntitySelection selection) => new(
@@ -40,7 +40,7 @@ internal static class OutlineFaults
 
     public static DrawingException BlockHoldsItself(EntitySource source, IEnumerable<string> chain) => new(
         DrawingFault.BlocksUnusable,
-        $"{source} puts a block into itself: '{string.Join("' in '", chain)}'. Delete the insertion within the block.")
+        $"{source} puts a block into itself: '{string.Join("' in '", chain.Select(Wording.Shown))}'. Delete the insertion within the block.")
     { Place = source.Place, Places = [new EntityPlace(source, null)] };
 
     public static DrawingException BlocksTooDeep(EntitySource source, int deepest) => new(
@@ -183,7 +183,7 @@ internal static class OutlineFaults
         .GroupBy(c => c.Kind)
         .Select(g => $" {g.Sum(c => c.Count)} {g.Key} not read: if they are part of the outline, {EntityKinds.Advice(g.Key)}."));
 
-    private static string Described(EntityCount c) => $"{c.Count} {c.Kind} on '{c.Layer}' ({Reason(c.Reason)})";
+    private static string Described(EntityCount c) => $"{c.Count} {Wording.Shown(c.Kind)} on '{Wording.Shown(c.Layer)}' ({Reason(c.Reason)})";
 
     private static string Reason(LeftOutReason reason) => reason switch
     {

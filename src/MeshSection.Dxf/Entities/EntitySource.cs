@@ -22,9 +22,9 @@ public sealed record EntitySource(string Kind, string? Handle, string Layer, Fil
     public EntitySource? Inserted { get; init; }
 
     /// <summary>Names the entity for a person: "LINE #2F on layer 'SECTION'".</summary>
-    public override string ToString() => $"{Name} on layer '{Layer}'";
+    public override string ToString() => $"{Name} on layer '{Wording.Shown(Layer)}'";
 
     /// <summary>Names the entity without its layer: "LINE #2F", or "LINE at line 214" if it has no handle.</summary>
     public string Name =>
-        (Handle is null ? $"{Kind} at {Place}" : $"{Kind} #{Handle}") + (Inserted is null ? "" : $" of {Inserted.Name}");
+        (Handle is null ? $"{Wording.Shown(Kind)} at {Place}" : $"{Wording.Shown(Kind)} #{Wording.Shown(Handle)}") + (Inserted is null ? "" : $" of {Inserted.Name}");
 }

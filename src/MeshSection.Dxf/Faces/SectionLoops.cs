@@ -182,8 +182,8 @@ internal sealed class SectionLoops
         {
             _notes.Add(new DrawingNote(
                 NoteCode.RegionsOverlap,
-                $"The regions {string.Join(", ", around.Select(c => $"'{c.Layer}'"))} overlap around {Wording.At(face.Inside)}; " +
-                $"'{face.Layer}' has the place, since it is named last.",
+                $"The regions {string.Join(", ", around.Select(c => $"'{Wording.Shown(c.Layer)}'"))} overlap around {Wording.At(face.Inside)}; " +
+                $"'{Wording.Shown(face.Layer)}' has the place, since it is named last.",
                 [], face.Inside));
         }
     }

@@ -70,7 +70,7 @@ internal sealed class BlockExpansion
         {
             _notes.Add(DrawingNote.About(
                 NoteCode.BlockMissing,
-                $"{source} puts the block '{block}' into the drawing, which " +
+                $"{source} puts the block '{Wording.Shown(block)}' into the drawing, which " +
                 (isExternal ? "lies in another file (an external reference): bind it in the drawing." : "is not in the file: export the drawing again."),
                 source));
         }

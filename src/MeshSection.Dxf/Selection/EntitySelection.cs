@@ -109,6 +109,6 @@ internal sealed class EntitySelection
 
     private static DrawingNote NotRead(EntityCount count) => DrawingNote.About(
         NoteCode.KindNotRead,
-        $"{count.Count} {count.Kind} on layer '{count.Layer}' not read: such entities are not supported. If they are " +
+        $"{count.Count} {Wording.Shown(count.Kind)} on layer '{Wording.Shown(count.Layer)}' not read: such entities are not supported. If they are " +
         $"part of the outline, {EntityKinds.Advice(count.Kind)}.");
 }

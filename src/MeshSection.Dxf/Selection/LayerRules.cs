@@ -69,7 +69,7 @@ internal sealed class LayerRules
         {
             notes.Add(DrawingNote.About(
                 NoteCode.HiddenLayerRead,
-                $"The layer '{layer.Name}' is off, frozen or not plotted; it was read since it was asked for by name."));
+                $"The layer '{Wording.Shown(layer.Name)}' is off, frozen or not plotted; it was read since it was asked for by name."));
         }
 
         return asked.Length > 0 && matching.Length == 0 ? LeftOutReason.LayerNotAsked

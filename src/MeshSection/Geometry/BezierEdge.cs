@@ -49,8 +49,13 @@ public sealed record BezierEdge : Edge
     {
         get
         {
-            // Farthest from the chord it runs beside it.
+            // Farthest from the chord it runs beside it. A part as short as the last digits has no chord.
             var sag = 0.0;
+            if (Start == End)
+            {
+                return sag;
+            }
+
             var across = Chord.Left() / Chord.Length;
             foreach (var t in Turnings(across))
             {

@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using MeshSection.Geometry;
 
 namespace MeshSection.Dxf;
@@ -6,4 +7,5 @@ namespace MeshSection.Dxf;
 /// <param name="Layer">The layer that made it so: the region's, or that of its boundary.</param>
 /// <param name="Inside">A point in it, in the drawing's axes and unit.</param>
 /// <param name="Area">Its area, in the drawing's unit, squared.</param>
-public sealed record DrawnFace(string Layer, Point Inside, double Area);
+/// <param name="Boundaries">Its boundaries in the outline's local axes, mm: the outer one, then those of what lies within.</param>
+public sealed record DrawnFace(string Layer, Point Inside, double Area, ImmutableArray<Boundary> Boundaries);

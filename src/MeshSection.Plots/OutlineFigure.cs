@@ -14,6 +14,7 @@ public static class OutlineFigure
 {
     private const int MostListed = 12;
     private static readonly Stroke Pointed = new(Palette.Orange, 3);
+    private static readonly Stroke InnerLine = new(Palette.Quiet, 1.6);
 
     /// <summary>Lays the picture out.</summary>
     /// <param name="outline">The outline; boundary i carries the number i + 1.</param>
@@ -45,6 +46,12 @@ public static class OutlineFigure
         ScaleBar.Add(sheet, view.Scale, unit, lengths.NoteOn(outline.Bounds));
 
         OutlineMarks.AddRegions(sheet, outline, view);
+        var layers = findings.Faces.Select(f => f.Layer).Distinct(StringComparer.Ordinal).ToList();
+        foreach (var face in findings.Faces)
+        {
+            sheet.Add(new Area([.. face.Boundaries.Select(view.Of)], Palette.Tint(layers.IndexOf(face.Layer)), InnerLine));
+        }
+
         foreach (var piece in pieces)
         {
             sheet.Add(new Polyline(view.Of(piece.Edge), StrokeOf(piece.Role)));
@@ -101,6 +108,13 @@ public static class OutlineFigure
 
         rows.Add(new LegendRow(p => [BoundaryMarks.Joint(p, 1)], "joint of two edges"));
         rows.Add(new LegendRow(p => [BoundaryMarks.Arrow(p, new Point(1, 0), Palette.Ink, 1)], "start, material on the left"));
+        var layers = findings.Faces.Select(f => f.Layer).Distinct(StringComparer.Ordinal).ToArray();
+        for (var i = 0; i < Math.Min(layers.Length, MostListed); i++)
+        {
+            var tint = Palette.Tint(i);
+            rows.Add(new LegendRow(p => [new Disc(p, 9, tint, InnerLine)], "layer " + layers[i]));
+        }
+
         foreach (var role in pieces.Select(p => p.Role).Distinct().Order())
         {
             rows.Add(LegendRow.OfLine(StrokeOf(role), role == PieceRole.LeadsNowhere ? "bounds nothing, left out" : "not chosen, left out"));
@@ -118,7 +132,7 @@ public static class OutlineFigure
 
         if (marks.Length > 0)
         {
-            rows.Add(new LegendRow(p => [new Disc(p, 13, OxyColors.Undefined, Pointed)], "repaired or left out"));
+            rows.Add(new LegendRow(p => [new Disc(p, 13, OxyColors.Undefined, Pointed)], "repaired, or to be checked"));
         }
 
         return rows.ToImmutable();

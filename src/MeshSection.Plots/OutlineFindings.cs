@@ -28,13 +28,22 @@ public sealed record OutlinePiece(Edge Edge, PieceRole Role);
 /// <param name="Diameter">Its diameter, mm; null if it is not known.</param>
 public sealed record OutlineBar(Point Place, double? Diameter);
 
+/// <summary>A face of the section that was told apart.</summary>
+/// <param name="Layer">What it belongs to.</param>
+/// <param name="Boundaries">Its boundaries, in the outline's local axes, mm.</param>
+public sealed record OutlineFace(string Layer, ImmutableArray<Boundary> Boundaries);
+
 /// <summary>What the picture of an outline shows beside its boundaries.</summary>
 /// <param name="Marks">Places to point out.</param>
 /// <param name="Pieces">Lines and curves that took no part.</param>
 /// <param name="Bars">Bars.</param>
+/// <param name="Faces">Faces that were told apart; none if the boundaries say it all.</param>
 public sealed record OutlineFindings(
-    ImmutableArray<OutlineMark> Marks, ImmutableArray<OutlinePiece> Pieces, ImmutableArray<OutlineBar> Bars)
+    ImmutableArray<OutlineMark> Marks,
+    ImmutableArray<OutlinePiece> Pieces,
+    ImmutableArray<OutlineBar> Bars,
+    ImmutableArray<OutlineFace> Faces)
 {
     /// <summary>Nothing beside the boundaries.</summary>
-    public static OutlineFindings None { get; } = new([], [], []);
+    public static OutlineFindings None { get; } = new([], [], [], []);
 }

@@ -28,9 +28,10 @@ public class SampleDrawingsTest
     }
 
     [Fact]
-    public void Only_the_gate_post_needs_mending()
+    public void Only_three_have_something_to_tell()
     {
-        foreach (var name in Names.Where(n => n != "gate-post"))
+        // Faults in the gate post, centre lines on the fender, and steel in the concrete of the pile cap.
+        foreach (var name in Names.Except(["gate-post", "quay-fender", "pile-cap"]))
         {
             var report = Outline(name, []).Report;
             Assert.Empty(report.Repairs);

@@ -49,9 +49,9 @@ public class LayoutTests
     public void Labels_of_a_crowded_outline_stay_on_the_picture_and_apart()
     {
         OutlineMark[] marks = [.. Enumerable.Range(0, 60).Select(i => new OutlineMark(new Point(7 * i, 3 * i), "duplicate left out"))];
-        CheckLabels(OutlineFigure.Of(Outlines.Perforated(), "Perforated", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [])));
-        CheckLabels(OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [])));
-        CheckLabels(OutlineFigure.Of(Outlines.Strip(), "Strip", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [])));
+        CheckLabels(OutlineFigure.Of(Outlines.Perforated(), "Perforated", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [], [])));
+        CheckLabels(OutlineFigure.Of(Outlines.Plate(), "Plate", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [], [])));
+        CheckLabels(OutlineFigure.Of(Outlines.Strip(), "Strip", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [], [])));
     }
 
     [Theory]

@@ -50,7 +50,7 @@ public class OutlineFigureTests
         var ring = Ring(home);
         Assert.Equal(hole.Max(p => p.X), ring.X, 6);
         Assert.True(ring.DistanceTo(Ring(far)) < 1e-3);
-        Assert.Superset(new HashSet<string>(["gap 0.02 bridged", "repaired or left out"]), Texts(far));
+        Assert.Superset(new HashSet<string>(["gap 0.02 bridged", "repaired, or to be checked"]), Texts(far));
 
         static ScreenPoint Ring(Figure f) => f.Marks.OfType<Disc>().Single(d => d.Radius == 16).Centre;
     }
@@ -78,7 +78,7 @@ public class OutlineFigureTests
     }
 
     private static Figure Of(Outline outline, params OutlineMark[] marks) =>
-        OutlineFigure.Of(outline, "Title", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], []));
+        OutlineFigure.Of(outline, "Title", LengthUnit.Millimetre, new OutlineFindings([.. marks], [], [], []));
 
     private static HashSet<string> Texts(Figure figure) => [.. figure.Marks.OfType<Label>().Select(l => l.Text)];
 

@@ -21,6 +21,28 @@ internal static class Cautions
         }
     }
 
+    /// <summary>Says what of the drawing takes no part in results for one material.</summary>
+    public static void WriteOneMaterial(Terminal terminal, SectionInput input, OutputRequest output)
+    {
+        if (output.IsQuiet || input.Drawing is not { } drawing)
+        {
+            return;
+        }
+
+        string[] layers = [.. drawing.Faces.Select(f => f.Layer).Distinct(StringComparer.OrdinalIgnoreCase)];
+        if (layers.Length > 1)
+        {
+            terminal.Error.WriteLine(
+                $"caution: the regions on {string.Join(", ", layers)} were taken as one material: properties by modular ratios are not computed yet.");
+        }
+
+        if (drawing.Bars.Length > 0)
+        {
+            terminal.Error.WriteLine(FormattableString.Invariant(
+                $"caution: the {drawing.Bars.Length} bars take no part in these properties, which are those of the gross section."));
+        }
+    }
+
     /// <summary>Writes what to know of a mesh, a line each.</summary>
     public static void Write(Terminal terminal, MeshRequest request, Mesh mesh, OutputRequest output)
     {

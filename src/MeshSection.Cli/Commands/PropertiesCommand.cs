@@ -57,6 +57,7 @@ internal static class PropertiesCommand
         }
 
         Cautions.Write(terminal, input, output);
+        Cautions.WriteOneMaterial(terminal, input, output);
         Cautions.Write(terminal, meshRequest, mesh, output);
         return CrossCheckVerdict.Status(terminal, properties);
     }

@@ -145,7 +145,8 @@ internal sealed class SectionLoops
             if (isChosen[i])
             {
                 var layer = around.Count > 0 ? around[^1].Layer : strands[face.Loops[0][0].Edge].Entity.Source.Layer;
-                faces.Add(new DrawnFace(layer, _frame.ToDrawing(face.Inside), face.Area / _frame.Scale / _frame.Scale));
+                var area = face.Area / _frame.Scale / _frame.Scale;
+                faces.Add(new DrawnFace(layer, _frame.ToDrawing(face.Inside), area, [.. face.Loops.Select(l => BoundaryOf(map, l))]));
                 NoteOverlap(around, faces[^1]);
             }
         }
@@ -173,8 +174,11 @@ internal sealed class SectionLoops
         return asked;
     }
 
-    private static bool Holds(PlanarMap map, MapFace face, Point point) => face.Loops.Sum(loop => WindingNumber.Of(
-        Boundary.Create(loop.Select(d => d.IsForward ? map.Edges[d.Edge] : map.Edges[d.Edge].Reversed())), point)) > 0;
+    private static bool Holds(PlanarMap map, MapFace face, Point point) =>
+        face.Loops.Sum(loop => WindingNumber.Of(BoundaryOf(map, loop), point)) > 0;
+
+    private static Boundary BoundaryOf(PlanarMap map, ImmutableArray<DirectedEdge> loop) =>
+        Boundary.Create(loop.Select(d => d.IsForward ? map.Edges[d.Edge] : map.Edges[d.Edge].Reversed()));
 
     private void NoteOverlap(List<Cover> around, DrawnFace face)
     {

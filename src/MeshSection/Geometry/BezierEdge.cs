@@ -10,7 +10,10 @@ namespace MeshSection.Geometry;
 public sealed record BezierEdge : Edge
 {
     // More pieces than a flattening would ever ask for.
-    private const int MostSteps = 1_000_000;
+    private const int MostSteps = 100_000;
+
+    // Where a piece rises by less than this part of the sag allowed, as at the tip of a needle, its turn does not count.
+    private const double Unseen = 1e-6;
 
     // Weights within a piece: where they differ more, the zeros of the denominator are too near for quadrature of high
     // order; at this ratio the nearest lies two lengths of the piece away.
@@ -219,26 +222,17 @@ public sealed record BezierEdge : Edge
     }
 
     /// <inheritdoc/>
-    public override IReadOnlyList<double> Turnings(Point direction)
+    public override IReadOnlyList<double> Turnings(Point direction) => Bernstein.SignChanges(SlopeAlong(direction));
+
+    /// <summary>The parameters at which the way to a point is at right angles to the curve, in rising order, ends excluded.</summary>
+    internal List<double> Perpendiculars(Point point)
     {
-        // The numerator of the derivative of X / W: X' W - X W'; with equal weights X' alone.
-        Span<double> x = stackalloc double[Controls.Length];
-        for (var i = 0; i < x.Length; i++)
-        {
-            x[i] = Weights[i] * direction.Dot(Controls[i] - Start);
-        }
-
-        var slope = Bernstein.Derivative(x);
-        if (Weights.AsSpan().IndexOfAnyExcept(Weights[0]) < 0)
-        {
-            return Bernstein.SignChanges(slope);
-        }
-
-        var first = Bernstein.Product(slope, Weights.AsSpan());
-        var second = Bernstein.Product(x, Bernstein.Derivative(Weights.AsSpan()));
+        // (P - p) · P' times W³, with X = W (P - p) along x and Y along y.
+        var first = Bernstein.Product(Along(Point.AlongX, point), SlopeAlong(Point.AlongX));
+        var second = Bernstein.Product(Along(Point.AlongY, point), SlopeAlong(Point.AlongY));
         for (var i = 0; i < first.Length; i++)
         {
-            first[i] -= second[i];
+            first[i] += second[i];
         }
 
         return Bernstein.SignChanges(first);
@@ -263,6 +257,38 @@ public sealed record BezierEdge : Edge
     /// <inheritdoc/>
     public override int GetHashCode() => HashCode.Combine(Start, End, Controls.Length);
 
+    /// <summary>W times the distance from a point along a direction, as Bernstein coefficients.</summary>
+    private double[] Along(Point direction, Point from)
+    {
+        var along = new double[Controls.Length];
+        for (var i = 0; i < along.Length; i++)
+        {
+            along[i] = Weights[i] * direction.Dot(Controls[i] - from);
+        }
+
+        return along;
+    }
+
+    /// <summary>The numerator of the derivative of X / W along a direction: X' W - X W'; with equal weights X' alone.</summary>
+    private double[] SlopeAlong(Point direction)
+    {
+        var x = Along(direction, Start);
+        var slope = Bernstein.Derivative(x);
+        if (Weights.AsSpan().IndexOfAnyExcept(Weights[0]) < 0)
+        {
+            return slope;
+        }
+
+        var first = Bernstein.Product(slope, Weights.AsSpan());
+        var second = Bernstein.Product(x, Bernstein.Derivative(Weights.AsSpan()));
+        for (var i = 0; i < first.Length; i++)
+        {
+            first[i] -= second[i];
+        }
+
+        return first;
+    }
+
     private bool Keeps(int steps, double maxSag, double maxTurn)
     {
         var (turn, tangent) = (Math.Cos(Math.Min(maxTurn, Math.PI)) - 1e-12, TangentAt(0));
@@ -270,7 +296,9 @@ public sealed record BezierEdge : Edge
         {
             var next = TangentAt((i + 1.0) / steps);
             var part = (BezierEdge)Part((double)i / steps, (i + 1.0) / steps);
-            if (tangent.Dot(next) < turn || part.Sag > maxSag || part.Weights.Max() > MostUneven * part.Weights.Min())
+            var sag = part.Sag;
+            var turnsTooFar = tangent.Dot(next) < turn && sag > Unseen * maxSag;
+            if (turnsTooFar || sag > maxSag || part.Weights.Max() > MostUneven * part.Weights.Min())
             {
                 return false;
             }

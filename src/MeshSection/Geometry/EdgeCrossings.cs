@@ -43,7 +43,8 @@ internal static class EdgeCrossings
             {
                 if (OfChords(p, q) is var (s, t))
                 {
-                    Add(fromA + s * (toA - fromA), fromB + t * (toB - fromB));
+                    var at = p.Start + s * p.Chord;
+                    Add(Parameter(a, at, fromA + s * (toA - fromA)), Parameter(b, at, fromB + t * (toB - fromB)));
                 }
 
                 return;
@@ -76,6 +77,10 @@ internal static class EdgeCrossings
 
         bool IsNear(Point p, Point q) => p.DistanceTo(q) <= tolerance;
     }
+
+    /// <summary>Along a Bézier curve the parameter does not run with the length, so that the chord does not tell it.</summary>
+    private static double Parameter(Edge edge, Point at, double byChord) =>
+        edge is BezierEdge ? NearestOnEdge.Parameter(edge, at) : byChord;
 
     /// <summary>Newton's steps from where chords cross, as long as they bring the two points nearer to each other.</summary>
     private static (double S, double T) Polished(Edge a, double s, Edge b, double t)

@@ -17,7 +17,12 @@ internal static class Wording
     /// <summary>A place at the beginning of a sentence.</summary>
     public static string Capital(FilePlace place) => place.IsByte ? $"At {place}" : $"L{place.ToString()[1..]}";
 
-    public static string At(Point p) => $"({Coordinate(p.X)}, {Coordinate(p.Y)})";
+    /// <summary>A place; a coordinate that is nothing but rounding beside the other is 0.</summary>
+    public static string At(Point p)
+    {
+        var rounding = 1e-13 * Math.Max(Math.Abs(p.X), Math.Abs(p.Y));
+        return $"({Coordinate(Math.Abs(p.X) > rounding ? p.X : 0)}, {Coordinate(Math.Abs(p.Y) > rounding ? p.Y : 0)})";
+    }
 
     /// <summary>A distance: four digits.</summary>
     public static string Distance(double value) => value.ToString("G4", CultureInfo.InvariantCulture);
